@@ -1,0 +1,67 @@
+import type { MilestoneName } from '../cosmology/milestones.ts';
+import type { Edition, ParameterSet, RedshiftGrid, Topic } from '../inputs/types.ts';
+
+/** One column of a topic. */
+export interface Column {
+  /** Column id, e.g. `D_L_Mpc`; also the CSV header. */
+  readonly id: string;
+  readonly topic: Topic;
+  /** Unit for people, plain text, e.g. "km/s/Mpc"; "" if dimensionless. */
+  readonly unit: string;
+}
+
+/** What an edition says of a table in every format. */
+export interface Stamp {
+  readonly edition: string;
+  readonly state: Edition['state'];
+  readonly method: string;
+  readonly set: ParameterSet;
+  /** Derived present densities, already text, in order of printing. */
+  readonly derived: readonly { readonly name: string; readonly value: string }[];
+  readonly constants: readonly { readonly symbol: string; readonly value: string; readonly unit: string; readonly source: string }[];
+  /** SHA-256 of the CSV bytes, hex. */
+  readonly checksum: string;
+}
+
+/** One table: a parameter set x a topic x a redshift grid. */
+export interface Table {
+  /** `<set>.<topic>.<grid>`, the file name without `.csv`. */
+  readonly id: string;
+  readonly set: ParameterSet;
+  readonly topic: Topic;
+  readonly grid: RedshiftGrid;
+  readonly columns: readonly Column[];
+  /** Redshifts as the grid writes them. */
+  readonly redshifts: readonly string[];
+  /** `values[row][column]` without the z column; null where the quantity does not exist. */
+  readonly values: readonly (readonly (number | null)[])[];
+  /** The CSV, as published. */
+  readonly csv: string;
+  readonly stamp: Stamp;
+  /** Rows of closed models that lie beyond the antipode, by index. */
+  readonly beyondAntipode: readonly number[];
+}
+
+/** One line of `<set>.milestones.csv`. */
+export interface Milestone {
+  readonly name: MilestoneName;
+  readonly unit: string;
+  /** A number, words (the fate), or null where it does not exist. */
+  readonly value: number | string | null;
+}
+
+export interface MilestoneTable {
+  /** `<set>.milestones` */
+  readonly id: string;
+  readonly set: ParameterSet;
+  readonly milestones: readonly Milestone[];
+  readonly csv: string;
+  readonly checksum: string;
+}
+
+/** All tables of one edition. */
+export interface EditionTables {
+  readonly edition: Edition;
+  readonly tables: readonly Table[];
+  readonly milestones: readonly MilestoneTable[];
+}
