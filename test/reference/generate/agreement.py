@@ -3,6 +3,7 @@
 import datetime
 import json
 import pathlib
+import re
 import subprocess
 
 from mpmath import mp, mpf
@@ -49,4 +50,6 @@ def write(path, provenance, body):
     """Writes one reference file, provenance first, one row of a list of rows per line."""
     head = {**provenance, "digits": STORED_DIGITS, "generated": datetime.date.today().isoformat()}
     path.parent.mkdir(exist_ok=True)
-    path.write_text(json.dumps({"provenance": head, **body}, indent=1, ensure_ascii=False) + "\n")
+    text = json.dumps({"provenance": head, **body}, indent=1, ensure_ascii=False)
+    short_lists = re.sub(r"\[\n\s+(\"[^\[\]{}]*?)\n\s+\]", lambda m: "[" + " ".join(m[1].split()) + "]", text)
+    path.write_text((short_lists if body.get("columns") else text) + "\n")

@@ -43,4 +43,5 @@ def main():
     }, {"nodes": [decimal(x) for x in first[::2]], "weights": [decimal(w) for w in first[1::2]]})
 
 
-main()
+if __name__ == "__main__":
+    main()
