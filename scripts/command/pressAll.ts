@@ -1,0 +1,21 @@
+import { setImmediate } from 'node:timers/promises';
+import type { Content } from '../../src/inputs/types.ts';
+import type { Press } from '../../src/site/press.ts';
+import { pressEdition } from '../../src/tables/pressEdition.ts';
+import { openProgress } from './progress.ts';
+
+/** Computes the tables of every edition and says how far it is. */
+export async function pressAll(content: Content): Promise<Press> {
+  const progress = openProgress();
+  const editions = [];
+  for (const edition of content.editions) {
+    await setImmediate(); // lets Ctrl-C through
+    editions.push(
+      pressEdition(content, edition, ({ set, done, of }) => {
+        progress.step(`Edition ${edition.number}: computed ${set} (${done} of ${of})`);
+      }),
+    );
+  }
+  progress.done();
+  return { content, editions };
+}

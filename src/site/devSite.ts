@@ -1,0 +1,53 @@
+import { type AstroIntegration, dev } from 'astro';
+import type { ViteDevServer } from 'vite';
+import { leavePress } from './leavePress.ts';
+import type { Press } from './press.ts';
+
+/** The pages under Astro's development server. */
+export interface DevSite {
+  readonly address: string;
+  /** Shows another press; open pages reload. */
+  show(press: Press): void;
+  /** Lays a message over the open pages, until the next `show`. */
+  complain(message: string): void;
+  close(): Promise<void>;
+}
+
+/** Starts the development server for what was pressed. `root` is the folder of the Astro configuration. */
+export async function devSite(press: Press, root: string, port: number): Promise<DevSite> {
+  const { site, base } = press.content.site;
+  leavePress(press);
+  let server: ViteDevServer | undefined;
+  const keepServer: AstroIntegration = {
+    name: 'redbound-dev',
+    hooks: {
+      'astro:server:setup': (setup) => {
+        server = setup.server;
+      },
+    },
+  };
+  const running = await dev({
+    root,
+    site,
+    base,
+    server: { port },
+    logLevel: 'warn',
+    devToolbar: { enabled: false },
+    integrations: [keepServer],
+  });
+  return {
+    address: `http://localhost:${running.address.port}${base}`,
+    show: (next) => {
+      leavePress(next);
+      if (server) reload(server);
+    },
+    complain: (message) => server?.ws.send({ type: 'error', err: { message, stack: '' } }),
+    close: () => running.stop(),
+  };
+}
+
+/** Modules that keep what they made of the old press are loaded anew. */
+function reload(server: ViteDevServer): void {
+  for (const environment of Object.values(server.environments)) environment.moduleGraph.invalidateAll();
+  server.ws.send({ type: 'full-reload' });
+}
