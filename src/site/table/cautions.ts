@@ -1,0 +1,27 @@
+import type { Table } from '../../tables/types.ts';
+import { isUnchecked, uncertaintySentence } from '../setCautions.ts';
+
+/** Below this redshift a peculiar velocity of 300 km/s (0.001 in z) is more than 3 per cent of z. */
+const PECULIAR = 0.03;
+
+/** What a reader of this table could be misled by, in short sentences of HTML. */
+export function cautions({ set, topic, redshifts, beyondAntipode }: Table): string[] {
+  const lines: string[] = [];
+  if (isUnchecked(set)) lines.push('Parameters written down from memory, not yet checked against the paper.');
+  lines.push(uncertaintySentence(set));
+  if (topic === 'distances' && redshifts.some((z) => Number(z) > 0 && Number(z) < PECULIAR)) {
+    lines.push(
+      `Below <i>z</i> = ${PECULIAR} peculiar velocities of 300 km/s shift a distance by more than 3 per cent.`,
+    );
+  }
+  const first = beyondAntipode[0];
+  if (first !== undefined) {
+    lines.push(
+      `From <i>z</i> = ${redshifts[first]} on, sources lie beyond the antipode: light has passed the far side of closed space.`,
+    );
+  }
+  if (redshifts.some((z) => Number(z) < 0)) {
+    lines.push('Rows with <i>z</i> &lt; 0 lie in the future; what needs an observed source is blank there.');
+  }
+  return lines;
+}
