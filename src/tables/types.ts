@@ -18,7 +18,12 @@ export interface Stamp {
   readonly set: ParameterSet;
   /** Derived present densities, already text, in order of printing. */
   readonly derived: readonly { readonly name: string; readonly value: string }[];
-  readonly constants: readonly { readonly symbol: string; readonly value: string; readonly unit: string; readonly source: string }[];
+  readonly constants: readonly {
+    readonly symbol: string;
+    readonly value: string;
+    readonly unit: string;
+    readonly source: string;
+  }[];
   /** SHA-256 of the CSV bytes, hex. */
   readonly checksum: string;
 }

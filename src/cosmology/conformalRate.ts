@@ -1,0 +1,58 @@
+import type { Background, MassiveNeutrino } from './background.ts';
+import { relicNeutrino } from './relicNeutrinos.ts';
+
+/**
+ * (a E)^2 at s = ln a: the square of the expansion rate in conformal time, in units of H0.
+ *
+ * Every integral of the tables is one of ds/(aE) (comoving distance, conformal time) or of a ds/(aE) (age); written
+ * with a factor a^2 the curvature term is a constant and nothing overflows at either end of time.
+ */
+export function conformalRateSquared(model: Background, s: number): number {
+  const u = Math.exp(-s);
+  const u2 = u * u;
+  let relativistic = model.photons + model.masslessNeutrinos;
+  for (const { relativistic: density, y0 } of model.massiveNeutrinos) {
+    relativistic += density * relicNeutrino(y0 / u).energy;
+  }
+  return model.matter * u + relativistic * u2 + model.curvature + darkEnergyTerm(model, s);
+}
+
+/** a^2 times the dark energy density: exp of `exponent(s)`. */
+function darkEnergyTerm(model: Background, s: number): number {
+  return model.darkEnergy === 0 ? 0 : model.darkEnergy * Math.exp(darkEnergyExponent(model, s));
+}
+
+function darkEnergyExponent(model: Background, s: number): number {
+  return (2 - 3 * model.onePlusW) * s + (model.wa === 0 ? 0 : 3 * model.wa * Math.expm1(s));
+}
+
+/**
+ * (aE)^2 at s = turn - shift, where it vanishes at s = turn: each term's difference to its value at the turn, so that
+ * no digits cancel close to it.
+ */
+export function conformalRateSquaredNearTurn(model: Background, turn: number, shift: number): number {
+  const u = Math.exp(-turn);
+  const radiation = (model.photons + model.masslessNeutrinos) * u * u;
+  let total = model.matter * u * Math.expm1(shift) + radiation * Math.expm1(2 * shift);
+  for (const neutrino of model.massiveNeutrinos) total += neutrinoDifference(neutrino, turn, shift);
+  if (model.darkEnergy === 0) return total;
+  const bend = model.wa === 0 ? 0 : 3 * model.wa * Math.exp(turn) * Math.expm1(-shift);
+  return total + darkEnergyTerm(model, turn) * Math.expm1(-(2 - 3 * model.onePlusW) * shift + bend);
+}
+
+/** u^2 R(y0/u) between the turn and turn - shift; R changes by the integral of dR/ds = R - G (Simpson's rule). */
+function neutrinoDifference({ relativistic, y0 }: MassiveNeutrino, turn: number, shift: number): number {
+  const at = (s: number) => relicNeutrino(y0 * Math.exp(s));
+  const u = Math.exp(-turn);
+  const here = at(turn - shift);
+  const there = at(turn);
+  const rising = (relic: { energy: number; pressure: number }) => relic.energy - relic.pressure;
+  const small = Math.abs(shift) < SIMPSON_LIMIT;
+  const change = small
+    ? (-shift / 6) * (rising(there) + 4 * rising(at(turn - shift / 2)) + rising(here))
+    : here.energy - there.energy;
+  return relativistic * u * u * (change * Math.exp(2 * shift) + there.energy * Math.expm1(2 * shift));
+}
+
+/** Simpson's error is shift^5/2880 against a change of order shift: below a unit of roundoff. */
+const SIMPSON_LIMIT = 7e-4;
