@@ -8,7 +8,6 @@ import { ContentError, readFolder } from './command/readFolder.ts';
 import { renewTables } from './command/renewTables.ts';
 import { runCommand } from './command/runCommand.ts';
 import { untilStopped } from './command/untilStopped.ts';
-import { watchContent } from './command/watchContent.ts';
 
 const help = {
   name: 'dev',
@@ -26,7 +25,7 @@ await runCommand(async () => {
   console.log(`
 ${press.content.site.title}: ${site.address}
 The pages follow the files in ${content}. Ctrl-C stops.`);
-  const watch = watchContent(content, async () => {
+  site.watch(content, async () => {
     try {
       const next = await renew(content, out);
       site.show(next);
@@ -38,7 +37,6 @@ The pages follow the files in ${content}. Ctrl-C stops.`);
     }
   });
   await untilStopped();
-  watch.close();
   await site.close();
 });
 

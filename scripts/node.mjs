@@ -1,8 +1,9 @@
 /**
  * `node scripts/node.mjs COMMAND [...]` runs scripts/COMMAND.ts, after making sure that this Node.js can.
- * Astro's telemetry is off in every command.
+ * No command lets Astro report usage or ask for newer versions.
  */
 import './requireNode.mjs';
 
 process.env.ASTRO_TELEMETRY_DISABLED = '1';
-import('./' + process.argv[2] + '.ts');
+process.env.ASTRO_DISABLE_UPDATE_CHECK = 'true';
+import(`./${process.argv[2]}.ts`);

@@ -1,3 +1,4 @@
+import { resolve, sep } from 'node:path';
 import { type AstroIntegration, dev } from 'astro';
 import type { ViteDevServer } from 'vite';
 import { leavePress } from './leavePress.ts';
@@ -6,6 +7,8 @@ import type { Press } from './press.ts';
 /** The pages under Astro's development server. */
 export interface DevSite {
   readonly address: string;
+  /** Calls `changed` after changes of files below `folder`: one call at a time, the last change always included. */
+  watch(folder: string, changed: () => Promise<void>): void;
   /** Shows another press; open pages reload. */
   show(press: Press): void;
   /** Lays a message over the open pages, until the next `show`. */
@@ -37,6 +40,7 @@ export async function devSite(press: Press, root: string, port: number): Promise
   });
   return {
     address: `http://localhost:${running.address.port}${base}`,
+    watch: (folder, changed) => watchFolder(running.watcher, resolve(folder), changed),
     show: (next) => {
       leavePress(next);
       if (server) reload(server);
@@ -44,6 +48,22 @@ export async function devSite(press: Press, root: string, port: number): Promise
     complain: (message) => server?.ws.send({ type: 'error', err: { message, stack: '' } }),
     close: () => running.stop(),
   };
+}
+
+/** Editors write a file in several steps; wait until they are done, ms. */
+const QUIET_TIME = 150;
+
+function watchFolder(watcher: ViteDevServer['watcher'], folder: string, changed: () => Promise<void>): void {
+  let timer: NodeJS.Timeout | undefined;
+  let running: Promise<void> = Promise.resolve();
+  watcher.add(folder);
+  watcher.on('all', (_, path) => {
+    if (!path.startsWith(`${folder}${sep}`)) return;
+    clearTimeout(timer);
+    timer = setTimeout(() => {
+      running = running.then(changed);
+    }, QUIET_TIME);
+  });
 }
 
 /** Modules that keep what they made of the old press are loaded anew. */
