@@ -117,3 +117,19 @@ export interface Content {
 
 /** Either everything, or every problem of all files. */
 export type ReadResult = { readonly content: Content } | { readonly problems: readonly Problem[] };
+
+/** A value read from a keeper's file, or null and at least one problem. A usable value may have problems as well. */
+export interface Checked<Value> {
+  readonly value: Value | null;
+  readonly problems: readonly Problem[];
+}
+
+/** Where an edition's file lists a parameter set or a redshift grid; without a number, the first edition that does. */
+export type PlaceInEdition = (kind: 'set' | 'grid', id: string, number?: string) => Place;
+
+export interface ReadOptions {
+  /** The ids of all columns: each must have its page in `quantities/`, and no other page may be there. */
+  readonly columnIds?: readonly string[] | undefined;
+  /** Checks that need the physics, made when the folder has no other problem. */
+  readonly extraChecks?: ((content: Content, placeOf: PlaceInEdition) => readonly Problem[]) | undefined;
+}

@@ -1,0 +1,43 @@
+import { existsSync, readdirSync, readFileSync, statSync } from 'node:fs';
+import { join } from 'node:path';
+import type { FileBytes } from './contentFiles.ts';
+
+const FOLDERS = ['parameter-sets', 'redshift-grids', 'quantities'];
+
+/**
+ * The bytes of every file that a content folder may hold, by path below it with slashes; null for a missing site.yaml
+ * or edition.yaml. Files with a dot or an
+ * underscore in front are the keeper's own affair.
+ */
+export function readFiles(folder: string): FileBytes {
+  const paths = [
+    'site.yaml',
+    ...FOLDERS.flatMap((name) => filesIn(join(folder, name)).map((file) => `${name}/${file}`)),
+    ...foldersIn(join(folder, 'editions')).map((number) => `editions/${number}/edition.yaml`),
+  ];
+  return new Map(paths.map((path) => [path, contents(join(folder, path))]));
+}
+
+function filesIn(folder: string): string[] {
+  return visible(folder).filter((name) => isFile(join(folder, name)));
+}
+
+function foldersIn(folder: string): string[] {
+  return visible(folder).filter((name) => statSync(join(folder, name)).isDirectory());
+}
+
+function visible(folder: string): string[] {
+  if (!existsSync(folder) || !statSync(folder).isDirectory()) return [];
+  // Sorted by character code, so that nothing depends on the order of the file system or the language of the machine.
+  return readdirSync(folder)
+    .filter((name) => !/^[._]/.test(name))
+    .sort();
+}
+
+function isFile(path: string): boolean {
+  return existsSync(path) && statSync(path).isFile();
+}
+
+function contents(path: string): Uint8Array | null {
+  return isFile(path) ? readFileSync(path) : null;
+}
