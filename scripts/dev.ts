@@ -7,6 +7,7 @@ import { projectRoot } from './command/projectRoot.ts';
 import { ContentError, readFolder } from './command/readFolder.ts';
 import { renewTables } from './command/renewTables.ts';
 import { runCommand } from './command/runCommand.ts';
+import { shortPath } from './command/shortPath.ts';
 import { untilStopped } from './command/untilStopped.ts';
 
 const help = {
@@ -24,7 +25,7 @@ await runCommand(async () => {
   const site = await devSite(press, projectRoot, FIRST_PORT);
   console.log(`
 ${press.content.site.title}: ${site.address}
-The pages follow the files in ${content}. Ctrl-C stops.`);
+The pages follow the files in ${shortPath(content)}. Ctrl-C stops.`);
   site.watch(content, async () => {
     try {
       const next = await renew(content, out);
@@ -43,7 +44,7 @@ The pages follow the files in ${content}. Ctrl-C stops.`);
 /** Reads, computes and, when `out` is given, writes the tables. */
 async function renew(content: string, out: string | undefined): Promise<Press> {
   if (out) checkOutput(out, content);
-  const press = await pressAll(await readFolder(content));
+  const press = await pressAll(readFolder(content));
   if (out) await renewTables(out, press.editions);
   return press;
 }

@@ -18,7 +18,7 @@ await runCommand(async () => {
   const { content, out = defaultOut } = folders;
   const started = performance.now();
   checkOutput(out, content);
-  const { editions } = await pressAll(await readFolder(content));
+  const { editions } = await pressAll(readFolder(content));
   const written = await renewTables(out, editions);
   console.log(summary(written ? 'Written' : 'The site holds these tables already', editions, started, out));
 });

@@ -11,7 +11,7 @@ import { summary } from './summary.ts';
 export async function buildAll(contentFolder: string, out: string): Promise<Press> {
   const started = performance.now();
   checkOutput(out, contentFolder);
-  const press = await pressAll(await readFolder(contentFolder));
+  const press = await pressAll(readFolder(contentFolder));
   console.log('Building the pages');
   await stagedRun(out, 'site', (folder) => buildSite(press, projectRoot, folder));
   console.log(summary('Built', press.editions, started, out));

@@ -11,8 +11,8 @@ export async function pressAll(content: Content): Promise<Press> {
   for (const edition of content.editions) {
     await setImmediate(); // lets Ctrl-C through
     editions.push(
-      pressEdition(content, edition, ({ set, done, of }) => {
-        progress.step(`Edition ${edition.number}: computed ${set} (${done} of ${of})`);
+      pressEdition(content, edition, (done, all, set) => {
+        progress.step(`Edition ${edition.number}: ${done} of ${all} parameter sets computed, ${set.id}`);
       }),
     );
   }

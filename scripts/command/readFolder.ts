@@ -1,5 +1,7 @@
-import { readContent } from '../../src/inputs/readContent.ts';
-import type { Content, Problem } from '../../src/inputs/types.ts';
+import { formatProblems } from '../../src/inputs/formatProblems.ts';
+import type { Content } from '../../src/inputs/types.ts';
+import { readPressable } from '../../src/tables/readPressable.ts';
+import { shortPath } from './shortPath.ts';
 
 /** The content has problems; the message lists them all. */
 export class ContentError extends Error {
@@ -7,16 +9,8 @@ export class ContentError extends Error {
 }
 
 /** @throws ContentError listing every problem of every file. */
-export async function readFolder(folder: string): Promise<Content> {
-  const result = await readContent(folder);
-  if ('problems' in result) throw new ContentError(problemsText(result.problems));
+export function readFolder(folder: string): Content {
+  const result = readPressable(shortPath(folder));
+  if ('problems' in result) throw new ContentError(`${formatProblems(result.problems)}. Nothing was written.`);
   return result.content;
-}
-
-function problemsText(problems: readonly Problem[]): string {
-  const lines = problems.map(
-    ({ file, line, column, wrong, expected }) => `${file}:${line}:${column}  ${wrong}  ${expected}`,
-  );
-  const count = problems.length === 1 ? '1 problem' : `${problems.length} problems`;
-  return [...lines, '', `${count} in the content. Nothing was written.`].join('\n');
 }

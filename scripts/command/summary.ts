@@ -1,21 +1,15 @@
-import { relative } from 'node:path';
 import { countTables } from '../../src/tables/countTables.ts';
 import type { EditionTables } from '../../src/tables/types.ts';
+import { shortPath } from './shortPath.ts';
 
 /** The closing line of a command: how much was made, how long it took (ms since `started`), and where it is. */
 export function summary(what: string, editions: readonly EditionTables[], started: number, out: string): string {
   const { tables, rows, cells } = countTables(editions);
   const seconds = ((performance.now() - started) / 1000).toFixed(1);
   const counts = `${plural(tables, 'table')}, ${plural(rows, 'row')}, ${plural(cells, 'cell')}`;
-  return `${what}: ${counts} in ${seconds} s, in ${shortest(out)}`;
+  return `${what}: ${counts} in ${seconds} s, in ${shortPath(out)}`;
 }
 
 function plural(count: number, noun: string): string {
   return `${count.toLocaleString('en-US')} ${noun}${count === 1 ? '' : 's'}`;
-}
-
-/** The path as one would type it here. */
-function shortest(path: string): string {
-  const near = relative(process.env.INIT_CWD ?? process.cwd(), path);
-  return near.startsWith('..') || near === '' ? path : near;
 }

@@ -18,7 +18,6 @@ export interface DevSite {
 
 /** Starts the development server for what was pressed. `root` is the folder of the Astro configuration. */
 export async function devSite(press: Press, root: string, port: number): Promise<DevSite> {
-  const { site, base } = press.content.site;
   leavePress(press);
   let server: ViteDevServer | undefined;
   const keepServer: AstroIntegration = {
@@ -31,15 +30,13 @@ export async function devSite(press: Press, root: string, port: number): Promise
   };
   const running = await dev({
     root,
-    site,
-    base,
     server: { port },
     logLevel: 'warn',
     devToolbar: { enabled: false },
     integrations: [keepServer],
   });
   return {
-    address: `http://localhost:${running.address.port}${base}`,
+    address: `http://localhost:${running.address.port}${press.content.site.base}`,
     watch: (folder, changed) => watchFolder(running.watcher, resolve(folder), changed),
     show: (next) => {
       leavePress(next);

@@ -23,13 +23,11 @@ export function press(): Promise<Press> {
 
 async function runPress(folder: string): Promise<Press> {
   // Loaded on demand: a build that finds the tables ready needs neither the reader nor the kernel.
-  const { readContent } = await import('../inputs/readContent.ts');
+  const { readPressable } = await import('../tables/readPressable.ts');
+  const { formatProblems } = await import('../inputs/formatProblems.ts');
   const { pressEdition } = await import('../tables/pressEdition.ts');
-  const result = await readContent(folder);
-  if ('problems' in result) {
-    const lines = result.problems.map((p) => `${p.file}:${p.line}:${p.column}  ${p.wrong}  ${p.expected}`);
-    throw new Error(`The content has ${lines.length} problem(s):\n${lines.join('\n')}`);
-  }
+  const result = readPressable(folder);
+  if ('problems' in result) throw new Error(formatProblems(result.problems));
   const { content } = result;
   return { content, editions: content.editions.map((edition) => pressEdition(content, edition)) };
 }
