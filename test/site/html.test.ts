@@ -1,0 +1,18 @@
+import { spawnSync } from 'node:child_process';
+import { join } from 'node:path';
+import { expect, test } from 'vitest';
+import { findJava } from '../../scripts/command/programs.ts';
+import { projectRoot } from '../support/runScript.ts';
+import { site } from './harness.ts';
+
+const VALIDATOR = join(projectRoot, 'node_modules/vnu-jar/build/dist/vnu.jar');
+
+test('every page is valid HTML, and every style sheet valid CSS', () => {
+  const java = findJava();
+  if (java === undefined)
+    throw new Error('The HTML validator needs a Java runtime: install one (npm test does, on Debian).');
+  const args = ['-jar', VALIDATOR, '--skip-non-html', '--format', 'gnu', site.dist];
+  const { status, stderr } = spawnSync(java, args, { encoding: 'utf8', maxBuffer: 1e8 });
+  expect(stderr.replaceAll(site.dist, '').split('\n').slice(0, 20).join('\n')).toBe('');
+  expect(status).toBe(0);
+});
