@@ -1,4 +1,5 @@
 import katex from 'katex';
+import { polishMathml } from './polishMathml.ts';
 
 /** A formula stands in a line of text, or in a line of its own. */
 export type FormulaStyle = 'inline' | 'display';
@@ -25,7 +26,7 @@ export function renderFormula(latex: string, style: FormulaStyle, where: string)
   const key = `${style} ${latex}`;
   const known = rendered.get(key);
   if (known !== undefined) return known;
-  const html = polished(checked(latex, typeset(latex, style, where), where));
+  const html = polishMathml(checked(latex, typeset(latex, style, where), where));
   rendered.set(key, html);
   return html;
 }
@@ -53,14 +54,4 @@ function checked(latex: string, html: string, where: string): string {
   const alphabet = html.match(/mathvariant="(?!normal")([^"]*)"/)?.[1];
   if (alphabet) throw new FormulaError(where, latex, `browsers do not draw the ${alphabet} alphabet; use \\mathrm`);
   return html;
-}
-
-/**
- * The bare `math` element. Bars around an absolute value become U+007C: the U+2223 that the typesetter writes is a relation
- * ("divides"), and browsers set the spaces of a relation around it.
- */
-function polished(html: string): string {
-  return html
-    .replace(/^<span class="katex">(.*)<\/span>$/s, '$1')
-    .replace(/(<m[io] [^>]*>)\u2223(?=<\/m[io]>)/g, '$1|');
 }

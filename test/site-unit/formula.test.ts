@@ -22,6 +22,28 @@ describe('renderFormula', () => {
     expect(html.match(/>\|</g)).toHaveLength(4);
   });
 
+  test.each(['w = -1', 'w \\ge -1', 'z \\to -1', '(-1)', '\\left( -x \\right)', '[a, -b]', 'x < +1'])(
+    'writes the sign of %s as a sign',
+    (latex) => expect(inline(latex)).toContain('<mo form="prefix">'),
+  );
+
+  test.each(['a - b', '(a) - b', 'x^2 + y', '-x', '10^{-4}'])('leaves the sign of %s to the browser', (latex) => {
+    expect(inline(latex)).not.toContain('form=');
+  });
+
+  test.each([
+    ['\\kappa \\sinh(x)', 1],
+    ['\\mathrm{d} \\ln a', 2],
+    ['5 \\log_{10} x', 2],
+    ['\\log_{10}(x)', 0],
+    ['2x - \\sin(x)', 0],
+    ['\\exp \\left( x \\right)', 0],
+    ['\\left| \\sin(x) \\right|', 0],
+    ['a \\, b', 1],
+  ])('sets %s with %i thin spaces', (latex, count) => {
+    expect(inline(latex).match(/<mspace width="0.1667em"/g) ?? []).toHaveLength(count);
+  });
+
   test('needs no style attribute and no error colour', () => {
     const html = inline('\\frac{c}{H_0} \\sqrt{\\frac{a}{b}} \\quad \\mathrm{d}z \\left( 1 \\right)');
     expect(html).not.toMatch(/style=|#cc0000|class=/);
