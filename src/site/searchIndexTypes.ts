@@ -31,8 +31,8 @@ export interface IndexedSet {
   readonly id: string;
   readonly title: string;
   readonly kind: string;
-  /** Parameters as written: value, and standard uncertainty if it has one. */
-  readonly parameters: Readonly<Record<string, readonly [value: string, u?: string]>>;
+  /** Parameters as written: the value, and behind it the standard uncertainty where there is one. */
+  readonly parameters: Readonly<Record<string, readonly string[]>>;
   /** Milestones that exist here, as the set's page prints them, without unit. */
   readonly milestones: Readonly<Record<string, string>>;
 }
@@ -53,7 +53,8 @@ interface Named {
 
 export interface IndexedColumn extends Named {
   readonly id: string;
-  readonly topic: Topic;
+  /** Missing for the redshift itself, which heads the rows of every table. */
+  readonly topic?: Topic | undefined;
 }
 
 export interface IndexedMilestone extends Named {

@@ -42,7 +42,8 @@ export function answer(text: string, library: Library): Answer {
  */
 function byNumber(library: Library, scope: Scope, query: Query, targets: readonly Target[]): Rows {
   const columns = columnsAmong(library, targets);
-  const rows = query.redshifts.map((redshift) => rowHits(scope, columns, redshift));
+  const inTables = columns.filter(({ topic }) => topic !== undefined);
+  const rows = query.redshifts.map((redshift) => rowHits(scope, inTables, redshift));
   const onRows = rows.flatMap(({ hits }) => hits);
   const notes = rows.flatMap((row) => row.notes);
   const values = query.values.flatMap((typed) => matchingValues(library.index, scope, targets, typed));
@@ -57,7 +58,8 @@ function byName(library: Library, scope: Scope, _query: Query, targets: readonly
   const columns = columnsAmong(library, targets);
   const [first = [], ...others] = scope.sets.map((set) => namedValues(library.index, scope, set, targets));
   const rest = others.flat();
-  const topics = columns.length > 0 ? [...new Set(columns.map(({ topic }) => topic))] : scope.topics;
+  const printed = [...new Set(columns.flatMap(({ topic }) => topic ?? []))];
+  const topics = columns.length > 0 ? printed : scope.topics;
   const tables = columns.length > 0 || named.topics || named.grids ? tableHits(scope, topics) : [];
   const sets = named.sets ? setHits(scope) : [];
   const pages = [...quantityHits(columns), ...tables];

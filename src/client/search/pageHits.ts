@@ -9,7 +9,7 @@ export function quantityHits(columns: readonly IndexedColumn[]): Hit[] {
   return columns.map(({ id, title, topic, unit }) => ({
     href: address.quantity(id),
     title: upperFirst(title),
-    detail: unit === '' ? `Definition and formula · ${topic}` : `Definition and formula · ${topic} · in ${unit}`,
+    detail: ['Definition and formula', ...(topic ? [topic] : []), ...(unit === '' ? [] : [`in ${unit}`])].join(' · '),
   }));
 }
 

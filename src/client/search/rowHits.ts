@@ -52,8 +52,9 @@ export function editionOf({ several, edition }: Scope): string[] {
 
 function wanted(scope: Scope, columns: readonly IndexedColumn[]) {
   if (columns.length === 0) return scope.topics.map((topic) => ({ topic, column: undefined }));
-  const topics: readonly string[] = scope.edition.topics;
-  return columns.filter(({ topic }) => topics.includes(topic)).map((column) => ({ topic: column.topic, column }));
+  return scope.edition.topics.flatMap((topic) =>
+    columns.filter((column) => column.topic === topic).map((column) => ({ topic, column })),
+  );
 }
 
 function rowsOf({ standing }: Place): number[] {
