@@ -1,4 +1,5 @@
 import type { Background, MassiveNeutrino } from './background.ts';
+import { relicEnergyChange } from './relicEnergyChange.ts';
 import { relicNeutrino } from './relicNeutrinos.ts';
 
 /**
@@ -34,25 +35,15 @@ export function conformalRateSquaredNearTurn(model: Background, turn: number, sh
   const u = Math.exp(-turn);
   const radiation = (model.photons + model.masslessNeutrinos) * u * u;
   let total = model.matter * u * Math.expm1(shift) + radiation * Math.expm1(2 * shift);
-  for (const neutrino of model.massiveNeutrinos) total += neutrinoDifference(neutrino, turn, shift);
+  for (const neutrino of model.massiveNeutrinos) total += u * u * neutrinoDifference(neutrino, turn, shift);
   if (model.darkEnergy === 0) return total;
   const bend = model.wa === 0 ? 0 : 3 * model.wa * Math.exp(turn) * Math.expm1(-shift);
   return total + darkEnergyTerm(model, turn) * Math.expm1(-(2 - 3 * model.onePlusW) * shift + bend);
 }
 
-/** u^2 R(y0/u) between the turn and turn - shift; R changes by the integral of dR/ds = R - G (Simpson's rule). */
+/** Change of R(y0/u) u^2 from the turn to turn - shift, without the factor u^2 at the turn. */
 function neutrinoDifference({ relativistic, y0 }: MassiveNeutrino, turn: number, shift: number): number {
-  const at = (s: number) => relicNeutrino(y0 * Math.exp(s));
-  const u = Math.exp(-turn);
-  const here = at(turn - shift);
-  const there = at(turn);
-  const rising = (relic: { energy: number; pressure: number }) => relic.energy - relic.pressure;
-  const small = Math.abs(shift) < SIMPSON_LIMIT;
-  const change = small
-    ? (-shift / 6) * (rising(there) + 4 * rising(at(turn - shift / 2)) + rising(here))
-    : here.energy - there.energy;
-  return relativistic * u * u * (change * Math.exp(2 * shift) + there.energy * Math.expm1(2 * shift));
+  const y = y0 * Math.exp(turn);
+  const change = relicEnergyChange(y, -shift) * Math.exp(2 * shift);
+  return relativistic * (change + relicNeutrino(y).energy * Math.expm1(2 * shift));
 }
-
-/** Simpson's error is shift^5/2880 against a change of order shift: below a unit of roundoff. */
-const SIMPSON_LIMIT = 7e-4;

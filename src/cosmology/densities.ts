@@ -5,7 +5,9 @@ import { relicNeutrino } from './relicNeutrinos.ts';
 export interface Densities {
   readonly matter: number;
   readonly photons: number;
+  /** All neutrinos. */
   readonly neutrinos: number;
+  readonly massiveNeutrinos: number;
   readonly neutrinoPressure: number;
   readonly curvature: number;
   readonly darkEnergy: number;
@@ -28,18 +30,19 @@ function darkEnergyGrowth(model: Background, u: number): number {
 export function densities(model: Background, u: number): Densities {
   const u2 = u * u;
   const u4 = u2 * u2;
-  let neutrinos = model.masslessNeutrinos;
+  let massive = 0;
   let pressure = model.masslessNeutrinos;
   for (const { relativistic, y0 } of model.massiveNeutrinos) {
     const relic = relicNeutrino(y0 / u);
-    neutrinos += relativistic * relic.energy;
+    massive += relativistic * relic.energy;
     pressure += relativistic * relic.pressure;
   }
   const darkEnergy = model.darkEnergy === 0 ? 0 : model.darkEnergy * darkEnergyGrowth(model, u);
   const parts = {
     matter: model.matter * u2 * u,
     photons: model.photons * u4,
-    neutrinos: neutrinos * u4,
+    neutrinos: (model.masslessNeutrinos + massive) * u4,
+    massiveNeutrinos: massive * u4,
     neutrinoPressure: (pressure * u4) / 3,
     curvature: model.curvature * u2,
     darkEnergy,

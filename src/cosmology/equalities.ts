@@ -51,9 +51,7 @@ export function accelerationOnset(model: Background, turns: TurningPoints): numb
 export function matterDarkEnergyEquality(model: Background, turns: TurningPoints): number | null {
   if (model.darkEnergy <= 0) return null;
   return firstFall((s) => {
-    const u = Math.exp(-s);
-    const d = densities(model, u);
-    const square = u * u;
-    return d.matter + d.neutrinos - model.masslessNeutrinos * square * square - d.darkEnergy;
+    const d = densities(model, Math.exp(-s));
+    return d.matter + d.massiveNeutrinos - d.darkEnergy;
   }, turns);
 }

@@ -16,23 +16,27 @@ interface Place {
   readonly distance: number;
 }
 
+/** A fall below zero by less than this is rounding: some models only approach zero, and never cross it. */
+const ROUNDING = 1e-12;
+
 /**
- * The first place going back in time where f(n, distance) falls through zero; null where it never does.
- * The distance to the last step is kept, so that a step and the root search integrate over one step only.
+ * The first place going back in time where f(n, distance) falls through zero; null where it never does. f is to be of
+ * order 1 near its zero. Distances start from the last place where f was positive, so that a step and the search for
+ * the root integrate over a step or two only.
  */
 function firstFall(model: Background, turns: TurningPoints, f: (n: number, distance: number) => number): Place | null {
   const end = Math.min(FARTHEST, turns.bounce === undefined ? FARTHEST : -turns.bounce);
-  let [n, reached] = [0, 0];
-  while (n < end) {
-    const [from, base] = [n, reached];
-    const distance = (x: number) => base + span(model, turns, -x, -from).conformal;
-    const next = Math.min(end, n + STEP);
-    const far = distance(next);
-    if (f(next, far) <= 0) {
-      const root = findRoot((x) => f(x, distance(x)), from, next);
+  let from: Place = { n: 0, distance: 0 };
+  for (let step = 1; step * STEP < end; step++) {
+    const { n, distance: base } = from;
+    const distance = (x: number) => base + span(model, turns, -x, -n).conformal;
+    const next = { n: step * STEP, distance: distance(step * STEP) };
+    const value = f(next.n, next.distance);
+    if (value < -ROUNDING) {
+      const root = findRoot((x) => f(x, distance(x)), n, next.n);
       return { n: root, distance: distance(root) };
     }
-    [n, reached] = [next, far];
+    if (value > 0) from = next;
   }
   return null;
 }
@@ -54,7 +58,8 @@ export function largestAngularDistance(
   const transverse = (distance: number) => transverseFactor(model.curvature * distance * distance) * distance;
   const place = firstFall(model, turns, (n, distance) => {
     const slope = transverseSlope(model.curvature * distance * distance);
-    return slope / Math.sqrt(conformalRateSquared(model, -n)) - transverse(distance);
+    const ratio = transverse(distance) * Math.sqrt(conformalRateSquared(model, -n));
+    return (slope - ratio) / (Math.abs(slope) + Math.abs(ratio));
   });
   if (place === null) return null;
   return { z: Math.expm1(place.n), distance: transverse(place.distance) * Math.exp(-place.n) };

@@ -1,5 +1,6 @@
 import type { Background } from './background.ts';
 import type { Epoch } from './epochs.ts';
+import { relicEnergyChange } from './relicEnergyChange.ts';
 import { relicNeutrino } from './relicNeutrinos.ts';
 
 /**
@@ -17,16 +18,23 @@ export function redshiftDrift(model: Background, { z, u, E, lookback }: Epoch): 
   const difference =
     -model.matter * square * z -
     (model.photons + model.masslessNeutrinos) * square * double +
-    massiveChange(model, u) * square +
+    massiveChange(model, z) * square +
     model.darkEnergy * (double - darkEnergyChange(model, z, u));
   return difference / (u + E);
 }
 
-/** Present density of the massive neutrinos less that at u over u^2. */
-function massiveChange(model: Background, u: number): number {
+/** Present density of the massive neutrinos less that at z over (1+z)^2. */
+function massiveChange(model: Background, z: number): number {
   let change = 0;
   for (const { relativistic, y0 } of model.massiveNeutrinos) {
-    change += relativistic * (relicNeutrino(y0).energy - relicNeutrino(y0 / u).energy * u * u);
+    const square = (1 + z) * (1 + z);
+    const today = relicNeutrino(y0).energy;
+    // For small z as a sum of two small changes, otherwise as it stands: each form cancels where the other does not.
+    change +=
+      relativistic *
+      (z < 1
+        ? -relicEnergyChange(y0, -Math.log1p(z)) * square - today * z * (2 + z)
+        : today - relicNeutrino(y0 / (1 + z)).energy * square);
   }
   return change;
 }

@@ -13,10 +13,15 @@ export interface Span {
 
 /** Within this of a turning point, in ln a, the variable is the root of the distance to it. */
 const NEAR_TURN = 0.5;
-function plainSpan(model: Background, lo: number, hi: number): Span {
+
+type Rate = (x: number) => { readonly s: number; readonly rateSquared: number; readonly jacobian: number };
+
+/** Both integrals over a variable x, given ln a, (aE)^2 and ds/dx at x. */
+function integrated(rate: Rate, lo: number, hi: number): Span {
   const { first, second } = integratePair(
-    (s, out) => {
-      const f = 1 / Math.sqrt(conformalRateSquared(model, s));
+    (x, out) => {
+      const { s, rateSquared, jacobian } = rate(x);
+      const f = jacobian / Math.sqrt(rateSquared);
       out[0] = f;
       out[1] = f * Math.exp(s);
     },
@@ -26,19 +31,22 @@ function plainSpan(model: Background, lo: number, hi: number): Span {
   return { conformal: first, time: second };
 }
 
-/** The span on one side of a turning point: with s = turn -+ v^2 the integrand's inverse root becomes smooth. */
-function turningSpan(model: Background, turn: number, side: 1 | -1, near: number, far: number): Span {
-  const { first, second } = integratePair(
-    (v, out) => {
-      const shift = side * v * v;
-      const f = (2 * v) / Math.sqrt(conformalRateSquaredNearTurn(model, turn, shift));
-      out[0] = f;
-      out[1] = f * Math.exp(turn - shift);
-    },
-    Math.sqrt(Math.max(0, near)),
-    Math.sqrt(far),
-  );
-  return { conformal: first, time: second };
+function plainSpan(model: Background, lo: number, hi: number): Span {
+  return integrated((s) => ({ s, rateSquared: conformalRateSquared(model, s), jacobian: 1 }), lo, hi);
+}
+
+/**
+ * The span of `width` in ln a whose nearer end lies `near` before (side 1) or after (side -1) a turning point. With
+ * v the root of the distance to the turn the integrand's inverse root becomes smooth; a span that is short against
+ * its distance has no need of that, and keeps the digits of its width in ln a.
+ */
+function turningSpan(model: Background, turn: number, side: 1 | -1, near: number, width: number): Span {
+  const at = (distance: number, jacobian: number) => {
+    const shift = side * distance;
+    return { s: turn - shift, rateSquared: conformalRateSquaredNearTurn(model, turn, shift), jacobian };
+  };
+  if (width < near / 4) return integrated((x) => at(near + x, 1), 0, width);
+  return integrated((v) => at(v * v, 2 * v), Math.sqrt(near), Math.sqrt(near + width));
 }
 
 const plus = (a: Span, b: Span): Span => ({ conformal: a.conformal + b.conformal, time: a.time + b.time });
@@ -51,12 +59,12 @@ const plus = (a: Span, b: Span): Span => ({ conformal: a.conformal + b.conformal
 export function span(model: Background, { bounce, maximum }: TurningPoints, lo: number, hi: number): Span {
   if (maximum !== undefined && hi > maximum - NEAR_TURN) {
     const split = Math.max(lo, maximum - NEAR_TURN);
-    const upper = turningSpan(model, maximum, 1, maximum - hi, maximum - split);
+    const upper = turningSpan(model, maximum, 1, maximum - hi, hi - split);
     return split > lo ? plus(span(model, { bounce }, lo, split), upper) : upper;
   }
   if (bounce !== undefined && lo < bounce + NEAR_TURN) {
     const split = Math.min(hi, bounce + NEAR_TURN);
-    const lower = turningSpan(model, bounce, -1, lo - bounce, split - bounce);
+    const lower = turningSpan(model, bounce, -1, lo - bounce, split - lo);
     return split < hi ? plus(lower, plainSpan(model, split, hi)) : lower;
   }
   return plainSpan(model, lo, hi);
