@@ -1,4 +1,3 @@
-import { build } from 'astro';
 import { leavePress } from './leavePress.ts';
 import type { Press } from './press.ts';
 
@@ -8,5 +7,6 @@ import type { Press } from './press.ts';
  */
 export async function buildSite(press: Press, root: string, folder: string): Promise<void> {
   leavePress(press);
+  const { build } = await import('astro'); // it takes a second to load, which help and refusals need not wait for
   await build({ root, outDir: folder, logLevel: 'warn' });
 }

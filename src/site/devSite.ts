@@ -1,5 +1,5 @@
 import { resolve, sep } from 'node:path';
-import { type AstroIntegration, dev } from 'astro';
+import type { AstroIntegration } from 'astro';
 import type { ViteDevServer } from 'vite';
 import { leavePress } from './leavePress.ts';
 import type { Press } from './press.ts';
@@ -19,6 +19,7 @@ export interface DevSite {
 /** Starts the development server for what was pressed. `root` is the folder of the Astro configuration. */
 export async function devSite(press: Press, root: string, port: number): Promise<DevSite> {
   leavePress(press);
+  const { dev } = await import('astro'); // it takes a second to load, which help and refusals need not wait for
   let server: ViteDevServer | undefined;
   const keepServer: AstroIntegration = {
     name: 'redbound-dev',
