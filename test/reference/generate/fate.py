@@ -28,3 +28,11 @@ def turning_point(model, digits):
     with mp.workdps(digits):
         return findroot(model.E2, (rough * (1 - mpf(10) ** -30), rough), solver="secant", tol=mpf(10) ** (4 - 2 * digits),
                         verify=False, maxsteps=20)
+
+
+def fate(model, turning_point):
+    """Dark energy whose density grows without limit tears everything apart in a finite time (Caldwell 2003, PRL 91, 071301)."""
+    if turning_point is not None:
+        return "recollapses"
+    grows = model.wa > 0 or (model.wa == 0 and model.w0 < -1)
+    return "big rip" if model.DE > 0 and grows else "expands forever"

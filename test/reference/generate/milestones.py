@@ -3,6 +3,7 @@
 from mpmath import cos, cosh, exp, expm1, findroot, mp, mpf, sqrt
 
 from constants import GIGAYEAR, MEGAPARSEC, SOLAR_MASS, SPEED_OF_LIGHT
+from fate import fate
 from quantities import horizons, transverse
 
 #: The scans run from 1 + z = e^LIMIT to e^-LIMIT in steps of 1/SCAN of ln(1 + z).
@@ -112,7 +113,7 @@ def milestones(model, line, at):
         "z_recession_c": recession_of_light(model, line, rough),
         "particle_horizon_today": today["particle_horizon_Mpc"],
         "event_horizon_today": today["event_horizon_Mpc"],
-        "fate": "expands forever" if line.turn is None else "recollapses",
+        "fate": fate(model, line.turn),
         "t_maximum": t_maximum,
         "t_crunch": None if t_maximum is None else 2 * t_maximum,
     }
