@@ -8,9 +8,10 @@ import type { EditionTables, MilestoneTable } from '../tables/types.ts';
 import { currentEdition, newestFirst } from './currentEdition.ts';
 import { MILESTONE_TEXT } from './milestoneText.ts';
 import { PARAMETER_TEXT } from './parameterText.ts';
+import { plainSymbol } from './plainSymbol.ts';
 import type { Press } from './press.ts';
 import type { IndexedColumn, IndexedEdition, IndexedGrid, IndexedSet, SearchIndex } from './searchIndexTypes.ts';
-import { MILESTONE_SEARCH_NAMES, PARAMETER_SEARCH_NAMES } from './searchNames.ts';
+import { MILESTONE_SEARCH_NAMES, PARAMETER_SEARCH_NAMES, PARAMETER_SEARCH_TITLES } from './searchNames.ts';
 import { setTitle } from './setTitle.ts';
 import { typographic } from './typographic.ts';
 
@@ -29,13 +30,13 @@ export function searchIndex(press: Press): SearchIndex {
     milestones: MILESTONE_NAMES.map((id) => ({
       id,
       title: MILESTONE_TEXT[id].name,
-      also: MILESTONE_SEARCH_NAMES[id],
+      also: [plainSymbol(MILESTONE_TEXT[id].symbol), ...MILESTONE_SEARCH_NAMES[id]],
       unit: unitOf(current.milestones[0], id),
     })),
     parameters: parameterIds().map((id) => ({
       id,
-      title: PARAMETER_TEXT[id].name,
-      also: PARAMETER_SEARCH_NAMES[id],
+      title: PARAMETER_SEARCH_TITLES[id] ?? PARAMETER_TEXT[id].name,
+      also: [id, ...PARAMETER_SEARCH_NAMES[id]],
       unit: PARAMETER_TEXT[id].unit,
     })),
   };
@@ -107,24 +108,23 @@ function indexedGrid({ id, title, redshifts }: RedshiftGrid): IndexedGrid {
   return { id, title, redshifts: redshifts.join(' ') };
 }
 
+/** The quantities that have a page, in order of printing, and behind them the redshift. */
 function indexedColumns({ quantities }: Content): IndexedColumn[] {
-  const columns = new Map(TOPICS.flatMap((topic) => columnsOf(topic).map((column) => [column.id, column] as const)));
-  return quantities.map(({ id, name, symbol, alsoCalled }) => {
-    const column = columns.get(id);
-    const also = [...shorter(name), plainSymbol(symbol), id, ...alsoCalled];
-    return { id, title: typographic(name), also, unit: column?.unit ?? '', topic: column?.topic };
-  });
+  const columns = TOPICS.flatMap((topic) => columnsOf(topic));
+  const ids = [...columns.map(({ id }) => id), 'z'];
+  return quantities
+    .toSorted((a, b) => ids.indexOf(a.id) - ids.indexOf(b.id))
+    .map(({ id, name, symbol, alsoCalled }) => {
+      const column = columns.find((one) => one.id === id);
+      const also = [...shorter(name), plainSymbol(symbol), id, ...alsoCalled];
+      return { id, title: typographic(name), also, unit: column?.unit ?? '', topic: column?.topic };
+    });
 }
 
 /** "Critical density (SI)" and "Comoving volume, all sky" are asked for without what follows too. */
 function shorter(name: string): string[] {
   const short = name.split(/ \(|, /)[0] as string;
   return short === name ? [] : [short];
-}
-
-/** LaTeX as one would type it: `\Omega_{\mathrm{bc}}(z)` is Omega_bc. */
-function plainSymbol(latex: string): string {
-  return latex.replace(/\\mathrm|[\\{}\s]/g, '').replace(/\(z\)$/, '');
 }
 
 function unitOf(table: MilestoneTable | undefined, name: MilestoneName): string {

@@ -83,3 +83,9 @@ export const PARAMETER_SEARCH_NAMES: Readonly<Record<keyof Parameters, readonly 
   N_eff: ['N_eff', 'Neff', 'number of neutrinos', 'effective number of neutrinos', 'neutrino species'],
   m_nu: ['m_nu', 'neutrino mass', 'sum of neutrino masses', 'neutrinos'],
 };
+
+/** Names of parameters where the name that the pages print leans on the line before it. */
+export const PARAMETER_SEARCH_TITLES: Readonly<Partial<Record<keyof Parameters, string>>> = {
+  Omega_m: 'Matter density',
+  wa: 'Change of the dark energy equation of state',
+};

@@ -72,15 +72,22 @@ function columnsAmong({ index }: Library, targets: readonly Target[]): IndexedCo
   return targets.flatMap(({ kind, at }) => (kind === 'column' ? [index.columns[at] as IndexedColumn] : []));
 }
 
+/** Things asked for by one name are all given; the reading names them while they are few. */
+const FEW = 2;
+
 function reading({ index }: Library, targets: readonly Target[], query: Query, scope: Scope): string {
-  const titles = targets.map(({ kind, at }) => {
+  const columnsOnly = query.redshifts.length > 0 && targets.some(({ kind }) => kind === 'column');
+  const titles = targets.flatMap(({ kind, at }) => {
+    if (columnsOnly && kind !== 'column') return [];
     const things = { column: index.columns, milestone: index.milestones, parameter: index.parameters }[kind];
-    return things[at]?.title ?? '';
+    return things[at]?.title ?? [];
   });
-  const names = [...new Set(titles)].join(' or ');
+  const different = [...new Set(titles)];
+  const names = different.length <= FEW || query.names.length === 0 ? different.slice(0, FEW) : query.names;
   const redshifts = query.redshifts.map(({ text }) => `z = ${text}`);
   const edition = query.edition === undefined ? [] : [`edition ${query.edition}`];
-  return [names, ...redshifts, scope.known.join(' '), ...edition].filter((part) => part !== '').join(', ');
+  const joined = names === query.names ? names.join(' ') : names.join(' or ');
+  return [joined, ...redshifts, scope.known.join(' '), ...edition].filter((part) => part !== '').join(', ');
 }
 
 function distinct(hits: readonly Hit[]): Hit[] {

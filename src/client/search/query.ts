@@ -9,6 +9,8 @@ import { keyOf, type Target, type Vocabulary, vocabulary } from './vocabulary.ts
 export interface Query {
   /** Quantities, milestones and parameters called by a name of theirs, the longest names first come. */
   readonly targets: readonly Target[];
+  /** Those names as typed. */
+  readonly names: readonly string[];
   /** Numbers that can be redshifts: behind "z" or "at", or bare. */
   readonly redshifts: readonly TypedNumber[];
   /** Numbers that can be values: with a unit, or bare. A bare number without a named quantity is in both lists. */
@@ -33,9 +35,10 @@ const LONGEST_UNIT = 3;
 
 export function reader(index: SearchIndex): Reader {
   const things = [...index.columns, ...index.milestones, ...index.parameters];
+  const words = vocabulary(index);
   return {
-    vocabulary: vocabulary(index),
-    names: setNames(index),
+    vocabulary: words,
+    names: setNames(index, words),
     editions: new Set(index.editions.map((edition) => edition.number)),
     units: new Set(things.map((thing) => unitKey(thing.unit)).filter((unit) => unit !== '')),
   };
@@ -52,6 +55,7 @@ export function unitKey(unit: string): string {
 export function parseQuery(text: string, reader: Reader): Query {
   const list = tokens(text);
   const targets: Target[] = [];
+  const names: string[] = [];
   const words: string[] = [];
   const marked: TypedNumber[] = [];
   const withUnit: TypedNumber[] = [];
@@ -72,8 +76,10 @@ export function parseQuery(text: string, reader: Reader): Query {
       n += 1;
     } else {
       const name = nameAt(list, n, reader.vocabulary);
-      if (name) targets.push(...name.targets);
-      else words.push(token.text);
+      if (name) {
+        targets.push(...name.targets);
+        names.push(...list.slice(n, n + name.length).map(({ text }) => text));
+      } else words.push(token.text);
       n += name?.length ?? 1;
     }
   }
@@ -81,6 +87,7 @@ export function parseQuery(text: string, reader: Reader): Query {
   const readAsValue = targets.every((target) => target.kind !== 'column') && marked.length === 0;
   return {
     targets,
+    names,
     redshifts: readAsRedshift ? [...marked, ...loose] : marked,
     values: readAsValue ? [...withUnit, ...loose] : withUnit,
     marked: loose.length === 0,

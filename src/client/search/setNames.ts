@@ -1,36 +1,50 @@
 import type { SearchIndex } from '../../site/searchIndexTypes.ts';
 import { type Token, tokens } from './tokens.ts';
+import { keyOf, type Vocabulary } from './vocabulary.ts';
 
 /** Numbers that belong to the names of parameter sets ("planck 2018", "0.3/0.7/70") and so are no redshifts. */
 export interface SetNames {
   readonly years: ReadonlySet<string>;
-  /** Two neighbouring terms, parted by a space, at least one of them a number. */
+  /** A word and the number behind it, parted by a space. */
   readonly pairs: ReadonlySet<string>;
+  /** The numbers of each name. */
+  readonly numbers: readonly ReadonlySet<string>[];
 }
 
-export function setNames(index: SearchIndex): SetNames {
-  const years = new Set<string>();
-  const pairs = new Set<string>();
-  for (const set of index.sets) {
-    for (const name of [set.title, set.id]) {
-      const words = tokens(name);
-      words.forEach((word, n) => {
-        if (isYear(word)) years.add(word.term);
-        const next = words[n + 1];
-        if (next && (word.value ?? next.value) !== undefined) pairs.add(`${word.term} ${next.term}`);
-      });
-    }
-  }
-  return { years, pairs };
+export function setNames(index: SearchIndex, { names }: Vocabulary): SetNames {
+  const lists = index.sets.flatMap(({ title, id }) => [tokens(title), tokens(id)]);
+  const pairs = lists.flatMap((list) =>
+    list.flatMap((word, n) => {
+      const next = list[n + 1];
+      // "H0 70" asks for a value of H0, even where a set is called so.
+      const isPair = word.value === undefined && next?.value !== undefined && !names.has(keyOf([word.term]));
+      return isPair ? [`${word.term} ${next.term}`] : [];
+    }),
+  );
+  const numbers = lists.map((list) => list.filter(({ value }) => value !== undefined));
+  return {
+    years: new Set(
+      numbers
+        .flat()
+        .filter(isYear)
+        .map(({ term }) => term),
+    ),
+    pairs: new Set(pairs),
+    numbers: numbers.map((list) => new Set(list.map(({ term }) => term))),
+  };
 }
 
-/** Whether the number at this position is part of a set's name. */
-export function belongsToName(names: SetNames, words: readonly Token[], n: number): boolean {
-  const term = (words[n] as Token).term;
-  if (names.years.has(term)) return true;
-  return names.pairs.has(`${words[n - 1]?.term} ${term}`) || names.pairs.has(`${term} ${words[n + 1]?.term}`);
+/** Whether the number at this position is part of a set's name: a year, or beside a word or number as in the name. */
+export function belongsToName({ years, pairs, numbers }: SetNames, list: readonly Token[], n: number): boolean {
+  const { term } = list[n] as Token;
+  const beside = [list[n - 1], list[n + 1]].flatMap((other) => (other?.value === undefined ? [] : [other.term]));
+  return (
+    years.has(term) ||
+    pairs.has(`${list[n - 1]?.term} ${term}`) ||
+    numbers.some((set) => set.has(term) && beside.some((other) => set.has(other)))
+  );
 }
 
-function isYear(word: Token): boolean {
-  return word.value !== undefined && Number.isInteger(word.value) && word.value >= 1900 && word.value < 2100;
+function isYear({ value }: Token): boolean {
+  return value !== undefined && Number.isInteger(value) && value >= 1900 && value < 2100;
 }
