@@ -39,16 +39,16 @@ def difference(first, second):
     return abs(first - second) / largest if largest else mpf(0)
 
 
-def decimal(value):
-    """The stored form: a string with STORED_DIGITS significant digits, or null."""
+def decimal(value, digits=STORED_DIGITS):
+    """The stored form: a string with that many significant digits, or null."""
     if value is None or isinstance(value, str):
         return value
-    return mp.nstr(value, STORED_DIGITS, strip_zeros=False, min_fixed=-4, max_fixed=12) if value else "0"
+    return mp.nstr(value, digits, strip_zeros=False, min_fixed=-4, max_fixed=12) if value else "0"
 
 
 def write(path, provenance, body):
     """Writes one reference file, provenance first, one row of a list of rows per line."""
-    head = {**provenance, "digits": STORED_DIGITS, "generated": datetime.date.today().isoformat()}
+    head = {"digits": STORED_DIGITS, **provenance, "generated": datetime.date.today().isoformat()}
     path.parent.mkdir(exist_ok=True)
     text = json.dumps({"provenance": head, **body}, indent=1, ensure_ascii=False)
     short_lists = re.sub(r"\[\n\s+(\"[^\[\]{}]*?)\n\s+\]", lambda m: "[" + " ".join(m[1].split()) + "]", text)

@@ -5,44 +5,48 @@
 
 Trapezoidal rule in u = ln x. All singularities lie at |Im u| >= pi/2, whatever y is, so the error falls almost like
 exp(-pi^2 / step): halving the step taken changes the sums by less than 1e-57. All y share the nodes, and the sums are
-kept in integers scaled by 2^BITS.
+kept in integers scaled by a power of two a little above the working precision.
 """
 
 import math
+from functools import cache
 
-from mpmath import exp, mpf, nint
+from mpmath import exp, mp, mpf, nint
 
-import agreement  # noqa: F401 - sets the working precision before the nodes are computed
+import agreement  # noqa: F401 - sets the working precision
 
 STEP = mpf(1) / 16
 #: x^2 and the weights (with dx = x du) fall below 1e-54 of their sums outside these limits of u.
 LOWEST, HIGHEST = -42, mpf(5)
-BITS = 220
 
 
-def scaled(value):
-    return int(nint(value * mpf(2) ** BITS))
+def scaled(value, bits):
+    return int(nint(value * mpf(2) ** bits))
 
 
-def nodes(step):
-    """[(x^2, x^3 step / (e^x + 1))] in scaled integers."""
+def working_bits():
+    return mp.prec + 20
+
+
+@cache
+def nodes(bits, step=STEP):
+    """[(x^2, x^3 step / (e^x + 1))] in integers scaled by 2^bits."""
     points = [exp(LOWEST + k * step) for k in range(int((HIGHEST - LOWEST) / step) + 1)]
-    return [(scaled(x * x), scaled(x**3 * step / (exp(x) + 1))) for x in points]
+    return [(scaled(x * x, bits), scaled(x**3 * step / (exp(x) + 1), bits)) for x in points]
 
 
-NODES = nodes(STEP)
+def energy_integral(y):
+    bits = working_bits()
+    square = scaled(y * y, bits)
+    total = sum(weight * math.isqrt((x2 + square) << bits) for x2, weight in nodes(bits))
+    return mpf(total) / mpf(2) ** (2 * bits)
 
 
-def energy_integral(y, over=NODES):
-    square = scaled(y * y)
-    total = sum(weight * math.isqrt((x2 + square) << BITS) for x2, weight in over)
-    return mpf(total) / mpf(2) ** (2 * BITS)
-
-
-def pressure_integral(y, over=NODES):
-    square = scaled(y * y)
-    total = sum(weight * x2 * (1 << BITS) // math.isqrt((x2 + square) << BITS) for x2, weight in over)
-    return mpf(total) / mpf(2) ** (2 * BITS)
+def pressure_integral(y):
+    bits = working_bits()
+    square = scaled(y * y, bits)
+    total = sum((weight * x2 << bits) // math.isqrt((x2 + square) << bits) for x2, weight in nodes(bits) if x2)
+    return mpf(total) / mpf(2) ** (2 * bits)
 
 
 #: F(0) = G(0) = 7 pi^4 / 120, by the same sum.
