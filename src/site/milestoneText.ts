@@ -3,8 +3,8 @@ import type { MilestoneName } from '../cosmology/milestones.ts';
 /** The words and the formula of one milestone. */
 export interface MilestoneText {
   readonly name: string;
-  /** LaTeX. */
-  readonly symbol: string;
+  /** LaTeX; the fate has none. */
+  readonly symbol?: string;
   /** LaTeX of the defining formula or condition; the fate has none. */
   readonly formula?: string;
   /** One sentence; says when there is no value. */
@@ -145,7 +145,6 @@ export const MILESTONE_TEXT: Readonly<Record<MilestoneName, MilestoneText>> = {
   },
   fate: {
     name: 'Fate',
-    symbol: 't \\to t_{\\mathrm{end}}',
     definition:
       'What the parameters, taken literally, say of the future: the model expands forever, recollapses, or ends in a big rip, where dark energy grows without limit.',
     quantity: 'Omega_DE',

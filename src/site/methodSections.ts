@@ -1,0 +1,48 @@
+import { CONSTANTS } from '../cosmology/constants.ts';
+import { renderFormula } from './formula.ts';
+import { renderMarkdown } from './markdown.ts';
+import { MODEL_TEXT } from './methods/modelText.ts';
+import { NUMBERS_TEXT } from './methods/numbersText.ts';
+import { READING_TEXT } from './methods/readingText.ts';
+import type { MethodText } from './methods/section.ts';
+import { quantityLink } from './quantityLink.ts';
+import { unitHtml } from './unitText.ts';
+import { writtenNumber } from './writtenNumber.ts';
+
+/** One section of the methods page. */
+export interface MethodSection {
+  /** Anchor on the page. */
+  readonly id: string;
+  readonly title: string;
+  readonly html: string;
+  /** Only in the section of the constants. Symbol, value and unit are HTML. */
+  readonly constants?: readonly ConstantLine[];
+}
+
+export interface ConstantLine {
+  readonly symbol: string;
+  readonly name: string;
+  readonly value: string;
+  readonly unit: string;
+  readonly source: string;
+}
+
+/** The sections of the methods page, in order. */
+export function methodSections(): readonly MethodSection[] {
+  return [...MODEL_TEXT, ...NUMBERS_TEXT, ...READING_TEXT].map(section);
+}
+
+function section({ id, title, body, lists }: MethodText): MethodSection {
+  const html = renderMarkdown(body, { where: `src/site/methods, section ${id}`, link: quantityLink });
+  return { id, title, html, ...(lists === 'constants' ? { constants: constantLines() } : {}) };
+}
+
+function constantLines(): readonly ConstantLine[] {
+  return CONSTANTS.map(({ symbol, name, value, unit, source }) => ({
+    symbol: renderFormula(symbol, 'inline', 'src/cosmology/constants.ts'),
+    name,
+    value: writtenNumber(value),
+    unit: unitHtml(unit),
+    source,
+  }));
+}

@@ -1,0 +1,10 @@
+/** One section of the methods page as it is written. */
+export interface MethodText {
+  /** Anchor on the page. */
+  readonly id: string;
+  readonly title: string;
+  /** Markdown with formulas; `[text](D_L_Mpc)` leads to a quantity, `[text](#blanks)` to a section. ASCII. */
+  readonly body: string;
+  /** What the program lists below the text. */
+  readonly lists?: 'constants';
+}
