@@ -30,7 +30,7 @@ export function searchIndex(press: Press): SearchIndex {
     milestones: MILESTONE_NAMES.map((id) => ({
       id,
       title: MILESTONE_TEXT[id].name,
-      also: [plainSymbol(MILESTONE_TEXT[id].symbol), ...MILESTONE_SEARCH_NAMES[id]],
+      also: [plainSymbol(MILESTONE_TEXT[id].symbol ?? ''), ...MILESTONE_SEARCH_NAMES[id]],
       unit: unitOf(current.milestones[0], id),
     })),
     parameters: parameterIds().map((id) => ({

@@ -27,6 +27,7 @@ export function startRuler({ table, rows }: Parts): Ruler {
   const rowOf = (target: EventTarget | null): Element | null =>
     target instanceof Element ? target.closest('tbody tr') : null;
 
+  table.dataset.ruler = '';
   makeStop(heads[0]);
   table.addEventListener('pointerover', ({ target }) => rule(rowOf(target)));
   table.addEventListener('pointerleave', () => rule(rowOf(document.activeElement)));

@@ -50,7 +50,7 @@ export function startTableTools(tools: HTMLElement, table: HTMLTableElement): vo
 
   /** Goes to the redshift that the address asks for, as a number: `#z=0.5` is the row 0.50 too. */
   function arrive(): void {
-    const asked = decodeURIComponent(location.hash.slice(1));
+    const asked = location.hash.slice(1);
     const z = /^z=/.test(asked) ? readNumber(asked) : undefined;
     if (z === undefined) return;
     const found = findRows(parts, z);
