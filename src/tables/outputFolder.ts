@@ -10,6 +10,7 @@ import {
   writeFileSync,
 } from 'node:fs';
 import { basename, dirname, join, resolve, sep } from 'node:path';
+import { isRunning } from './isRunning.ts';
 
 /** What a folder written by a command holds: everything, or the tables alone. */
 export type OutputKind = 'site' | 'tables';
@@ -97,16 +98,6 @@ function isLeftover(name: string, place: string): boolean {
   const prefix = basename(besidePlace(place, ''));
   const process = /^(\d+)-(?:new|old)$/.exec(name.startsWith(prefix) ? name.slice(prefix.length) : '')?.[1];
   return process !== undefined && !isRunning(Number(process));
-}
-
-function isRunning(id: number): boolean {
-  if (id === process.pid) return false; // a folder of an earlier process that had this number
-  try {
-    process.kill(id, 0);
-    return true;
-  } catch (error) {
-    return (error as NodeJS.ErrnoException).code === 'EPERM';
-  }
 }
 
 /** Renaming a symbolic link would replace the link, not the folder it names. */
