@@ -1,7 +1,8 @@
 import type { z } from 'zod';
 import type { Checked, Problem } from './types.ts';
 import { WrittenNumber } from './writtenNumber.ts';
-import type { Path, YamlFile } from './yamlFile.ts';
+import type { YamlFile } from './yamlFile.ts';
+import type { Path } from './yamlPlaces.ts';
 
 /** Checks a file against a schema of `fields.ts`. Without a value there is at least one problem. */
 export function checkYaml<Schema extends z.ZodType>(yaml: YamlFile, schema: Schema): Checked<z.output<Schema>> {

@@ -1,7 +1,7 @@
 import { smallestEigenvalue } from '../numerics/smallestEigenvalue.ts';
 import { asMapping, type Mapping } from './asMapping.ts';
 import { problemAt } from './checkYaml.ts';
-import { SCALAR_PARAMETERS } from './parameterRules.ts';
+import { hasUnknownKeys, SCALAR_PARAMETERS } from './parameterRules.ts';
 import type { Problem } from './types.ts';
 import { WrittenNumber } from './writtenNumber.ts';
 import type { YamlFile } from './yamlFile.ts';
@@ -42,11 +42,14 @@ function asEntry(entry: unknown, index: number): Entry[] {
 
 function withoutUncertainty(yaml: YamlFile, parameters: Mapping<string>, { index, names }: Entry): Problem[] {
   const [first, second] = names;
+  // The parameter may stand there under a wrong name, which is reported already.
+  const unknownKeys = hasUnknownKeys(parameters);
   if (first === second) {
     const expected = 'two different parameters';
     return [problemAt(yaml, ['correlations', index], `${first} is correlated with itself`, expected)];
   }
   return names.flatMap((name, i) => {
+    if (unknownKeys && parameters[name] === undefined) return [];
     if (asMapping<'u'>(parameters[name]).u !== undefined) return [];
     const wrong = `correlation of ${name}, which has no uncertainty`;
     return [problemAt(yaml, ['correlations', index, i], wrong, `parameters.${name} as {value: ..., u: ...}`)];

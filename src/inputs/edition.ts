@@ -61,7 +61,7 @@ function repeatedProblems(yaml: YamlFile, value: Raw): Problem[] {
   return (['parameter_sets', 'redshift_grids', 'topics'] as const).flatMap((key) =>
     value[key].flatMap((id, index) =>
       value[key].indexOf(id as never) < index
-        ? [problemAt(yaml, [key, index], `${id} is listed twice`, 'each id once')]
+        ? [problemAt(yaml, [key, index], `${id} is listed twice`, 'each once')]
         : [],
     ),
   );

@@ -1,6 +1,8 @@
+import type { Parameters } from '../cosmology/parameters.ts';
 import type { Decimal } from '../numerics/decimal.ts';
 import { asMapping, type Mapping } from './asMapping.ts';
 import { problemAt } from './checkYaml.ts';
+import { hasUnknownKeys } from './parameterRules.ts';
 import type { Problem } from './types.ts';
 import { WrittenNumber } from './writtenNumber.ts';
 import type { YamlFile } from './yamlFile.ts';
@@ -16,7 +18,7 @@ export function parameterProblems(yaml: YamlFile): Problem[] {
 
 /** A published number must be found again in its paper. */
 function sourceProblems(yaml: YamlFile, set: { kind?: unknown; source?: unknown }): Problem[] {
-  const source = asMapping<string>(set.source);
+  const source = asMapping(set.source);
   if (set.kind !== 'published' || set.source === undefined) return [];
   const wanted = { doi: 'the DOI of the paper', where: 'table and column of the paper' };
   return Object.entries(wanted)
@@ -26,43 +28,40 @@ function sourceProblems(yaml: YamlFile, set: { kind?: unknown; source?: unknown 
     );
 }
 
-function densityProblems(yaml: YamlFile, parameters: Mapping<string>): Problem[] {
-  const given = (name: string) => parameters[name] !== undefined;
-  const at = (name: string, wrong: string, expected: string) => problemAt(yaml, ['parameters', name], wrong, expected);
-  const problems: Problem[] = [];
-  const physical = ['omega_b', 'omega_c'].filter(given);
-  if (given('Omega_m') && physical.length > 0) {
-    problems.push(
-      at(
-        'Omega_m',
-        `matter is given twice: Omega_m and ${physical.join(', ')}`,
-        'either Omega_m, or omega_b and omega_c',
-      ),
-    );
-  } else if (!given('Omega_m') && physical.length === 1) {
-    const missing = given('omega_b') ? 'omega_c' : 'omega_b';
-    problems.push(at(missing, `parameters.${missing} is missing`, 'omega_b and omega_c together, or Omega_m instead'));
-  } else if (!given('Omega_m') && physical.length === 0 && Object.keys(parameters).length > 0) {
-    problems.push(at('Omega_m', 'the matter density is missing', 'Omega_m, or omega_b and omega_c'));
+type Given = Mapping<keyof Parameters>;
+type Report = (name: string, wrong: string, expected: string) => Problem;
+
+function densityProblems(yaml: YamlFile, parameters: Given): Problem[] {
+  const report: Report = (name, wrong, expected) => problemAt(yaml, ['parameters', name], wrong, expected);
+  const problems = [...matterProblems(parameters, report), ...neutrinoProblems(parameters, report)];
+  if (parameters.Omega_k === undefined || parameters.Omega_DE === undefined) return problems;
+  const expected = 'one of them: the other follows from the sum being 1';
+  return [...problems, report('Omega_DE', 'both Omega_k and Omega_DE are given', expected)];
+}
+
+function matterProblems(parameters: Given, report: Report): Problem[] {
+  const physical = (['omega_b', 'omega_c'] as const).filter((name) => parameters[name] !== undefined);
+  const [only] = physical;
+  if (parameters.Omega_m !== undefined) {
+    if (only === undefined) return [];
+    const wrong = `matter is given twice: Omega_m and ${physical.join(', ')}`;
+    return [report('Omega_m', wrong, 'either Omega_m, or omega_b and omega_c')];
   }
-  if (given('Omega_k') && given('Omega_DE')) {
-    problems.push(
-      at('Omega_DE', 'both Omega_k and Omega_DE are given', 'one of them: the other follows from the sum being 1'),
-    );
-  }
-  return [...problems, ...neutrinoProblems(parameters, at)];
+  // What is missing may stand there under a wrong name, which is reported already.
+  if (physical.length === 2 || hasUnknownKeys(parameters) || Object.keys(parameters).length === 0) return [];
+  if (only === undefined)
+    return [report('Omega_m', 'the matter density is missing', 'Omega_m, or omega_b and omega_c')];
+  const missing = only === 'omega_b' ? 'omega_c' : 'omega_b';
+  return [report(missing, `parameters.${missing} is missing`, 'omega_b and omega_c together, or Omega_m instead')];
 }
 
 /** Massive neutrinos have their number and temperature from N_eff and T_CMB. */
-function neutrinoProblems(
-  parameters: Mapping<string>,
-  at: (name: string, wrong: string, expected: string) => Problem,
-): Problem[] {
+function neutrinoProblems(parameters: Given, report: Report): Problem[] {
   const { m_nu: masses } = parameters;
   if (!Array.isArray(masses) || !masses.some((mass) => decimalOf(mass)?.sign() === 1)) return [];
-  return ['T_CMB', 'N_eff']
+  return (['T_CMB', 'N_eff'] as const)
     .filter((name) => decimalOf(parameters[name])?.isZero())
-    .map((name) => at(name, `${name} is 0, but m_nu has a mass`, `${name} greater than 0, or no masses: m_nu: []`));
+    .map((name) => report(name, `${name} is 0, but m_nu has a mass`, `${name} greater than 0, or no masses: m_nu: []`));
 }
 
 /** The decimal of a number or of {value, u}; undefined if it is neither. */

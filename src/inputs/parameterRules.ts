@@ -19,8 +19,8 @@ export const PARAMETER_RULES: Readonly<Record<keyof Parameters, NumberRule>> = {
   omega_c: { what: 'the cold dark matter density Omega_c h^2', least: '0', most: '1', slip: PER_CENT },
   Omega_k: { what: 'the curvature, positive if open', least: '-10', most: '10', slip: PER_CENT },
   Omega_DE: { what: 'the dark energy density over the critical density', least: '-10', most: '10', slip: PER_CENT },
-  w0: { what: 'a pressure over density', least: '-10', most: '10' },
-  wa: { what: 'a change of w', least: '-20', most: '20' },
+  w0: { what: 'the equation of state today, -1 for a cosmological constant', least: '-10', most: '10' },
+  wa: { what: 'the change of the equation of state, 0 for none', least: '-20', most: '20' },
   T_CMB: {
     what: 'a temperature in K, 0 to neglect radiation',
     least: '0',
@@ -49,3 +49,8 @@ export const SCALAR_PARAMETERS = [
   'T_CMB',
   'N_eff',
 ] as const satisfies readonly ScalarParameter[];
+
+/** Does the mapping have keys that are no parameters? Then one of them may be a parameter misspelt. */
+export function hasUnknownKeys(parameters: object): boolean {
+  return Object.keys(parameters).some((key) => !Object.hasOwn(PARAMETER_RULES, key));
+}

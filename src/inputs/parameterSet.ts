@@ -11,12 +11,7 @@ import { WrittenNumber } from './writtenNumber.ts';
 import type { YamlFile } from './yamlFile.ts';
 
 const UNCERTAINTY: NumberRule = { what: 'a standard uncertainty', above: '0' };
-const COEFFICIENT: NumberRule = {
-  what: 'a correlation coefficient',
-  least: '-1',
-  most: '1',
-  slip: { looksLike: 'per cent', factor: '0.01' },
-};
+const COEFFICIENT: NumberRule = { what: 'a correlation coefficient', least: '-1', most: '1' };
 
 /** A number, or a number with its standard uncertainty. */
 function parameter(name: ScalarParameter) {

@@ -1,5 +1,6 @@
 import { isAlias, isMap, isScalar, isSeq, type Node, type Pair, type Scalar } from 'yaml';
 import { WrittenNumber } from './writtenNumber.ts';
+import { keyText, offsetOf } from './yamlPlaces.ts';
 
 /** Something that YAML allows and a keeper's file does not use, by its offset in the text. */
 export interface Refused {
@@ -22,7 +23,7 @@ function convert(node: unknown, refused: Refused[]): unknown {
   if (isSeq(node)) return node.items.map((item) => convert(item, refused));
   if (isAlias(node)) {
     refused.push({
-      offset: offsetOf(node),
+      offset: offsetOf(node) ?? 0,
       wrong: `"*${node.source}" refers to another place`,
       expected: 'the value itself',
     });
@@ -35,9 +36,9 @@ function convertMap(pairs: readonly Pair[], refused: Refused[]): Record<string, 
   // No prototype, so that a key named "constructor" is a key like any other.
   const mapping: Record<string, unknown> = Object.create(null);
   for (const { key, value } of pairs) {
-    const name = isScalar(key) && key.value !== null ? (key.source ?? String(key.value)) : '';
+    const name = keyText(key);
     if (name === '')
-      refused.push({ offset: offsetOf(key), wrong: 'a key is no word', expected: 'a key such as "title"' });
+      refused.push({ offset: offsetOf(key) ?? 0, wrong: 'a key is no word', expected: 'a key such as "title"' });
     mapping[name] = convert(value, refused);
   }
   return mapping;
@@ -47,8 +48,4 @@ function convertScalar({ value, source }: Scalar): unknown {
   if (typeof value === 'number' || typeof value === 'bigint') return new WrittenNumber(source ?? String(value));
   if (typeof value === 'string' || typeof value === 'boolean' || value === null) return value;
   return source ?? String(value);
-}
-
-function offsetOf(node: unknown): number {
-  return (node as Node | null)?.range?.[0] ?? 0;
 }

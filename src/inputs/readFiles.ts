@@ -1,4 +1,4 @@
-import { existsSync, readdirSync, readFileSync, statSync } from 'node:fs';
+import { readdirSync, readFileSync, statSync } from 'node:fs';
 import { join } from 'node:path';
 import type { FileBytes } from './contentFiles.ts';
 
@@ -23,19 +23,23 @@ function filesIn(folder: string): string[] {
 }
 
 function foldersIn(folder: string): string[] {
-  return visible(folder).filter((name) => statSync(join(folder, name)).isDirectory());
+  return visible(folder).filter((name) => isFolder(join(folder, name)));
 }
 
 function visible(folder: string): string[] {
-  if (!existsSync(folder) || !statSync(folder).isDirectory()) return [];
-  // Sorted by character code, so that nothing depends on the order of the file system or the language of the machine.
+  if (!isFolder(folder)) return [];
+  // Sorted by character code, so that nothing depends on the file system or the language of the machine.
   return readdirSync(folder)
     .filter((name) => !/^[._]/.test(name))
     .sort();
 }
 
 function isFile(path: string): boolean {
-  return existsSync(path) && statSync(path).isFile();
+  return statSync(path, { throwIfNoEntry: false })?.isFile() ?? false;
+}
+
+function isFolder(path: string): boolean {
+  return statSync(path, { throwIfNoEntry: false })?.isDirectory() ?? false;
 }
 
 function contents(path: string): Uint8Array | null {

@@ -47,12 +47,15 @@ const ALIASES: Readonly<Record<string, string>> = {
   email: 'contact',
 };
 
+/** Two slips in five letters ("plane" for "plain"), one in four. */
+const SLIPS_PER_LETTER = 0.4;
+
 /** Where a name that differs only in its case means something else, the suggestion says what it stands for. */
 const MEANING: Readonly<Record<string, string>> = { omega_b: 'Omega_b h^2', omega_c: 'Omega_c h^2' };
 
 /**
  * The one of `candidates` that was probably meant by `word`: the same but for case and punctuation, a known other name,
- * or the nearest within a third of its letters. Undefined when nothing is near.
+ * or the nearest with few letters to change. Undefined when nothing is near.
  */
 export function nearest(word: string, candidates: readonly string[]): string | undefined {
   const plain = bare(word);
@@ -61,19 +64,28 @@ export function nearest(word: string, candidates: readonly string[]): string | u
   const alias = Object.hasOwn(ALIASES, plain) ? ALIASES[plain] : undefined;
   if (alias !== undefined && candidates.includes(alias)) return alias;
   const ranked = candidates
-    .map((candidate) => ({ candidate, slips: distance(bare(candidate), plain) }))
-    .filter(({ candidate, slips }) => slips <= Math.max(1, Math.floor(bare(candidate).length / 3)))
-    .sort((a, b) => a.slips - b.slips);
+    .map((candidate) => ({ candidate, count: slips(bare(candidate), plain) }))
+    .filter(({ candidate, count }) => count <= Math.max(1, Math.floor(SLIPS_PER_LETTER * bare(candidate).length)))
+    .sort((a, b) => a.count - b.count);
   // One slip in a name of two letters is another name: "to" is not "w0".
   return plain.length > 2 ? ranked[0]?.candidate : undefined;
 }
 
 /** What was expected instead of `word`: the probable one of `candidates`, otherwise all of them. */
 export function expectedOneOf(word: string, candidates: readonly string[]): string {
+  if (/^\d+$/.test(word) && candidates.some((candidate) => !/^[\d.]+$/.test(candidate))) {
+    return 'a key; a decimal has a point, as a comma ends it';
+  }
   const guess = nearest(word, candidates);
   if (guess === undefined) return candidates.length === 0 ? 'nothing here' : `one of ${candidates.join(', ')}`;
   const meaning = MEANING[guess];
   return `did you mean ${guess}${meaning === undefined ? '' : ` (${meaning})`}?`;
+}
+
+/** Letters to change; the right letters in another order are one slip. */
+function slips(a: string, b: string): number {
+  const letters = (word: string) => [...word].sort().join('');
+  return a !== b && letters(a) === letters(b) ? 1 : distance(a, b);
 }
 
 function bare(word: string): string {

@@ -1,38 +1,77 @@
 import type { YAMLError } from 'yaml';
 
-/** A message of the YAML parser in words for somebody who has never read its grammar. */
-export function yamlProblem(error: YAMLError, text: string): { wrong: string; expected: string } {
-  const word = /^[^\s:,[\]{}]+/.exec(text.slice(error.pos[0]))?.[0] ?? '';
-  switch (error.code) {
-    case 'TAB_AS_INDENT':
-      return { wrong: 'a tab indents this line', expected: 'spaces' };
-    case 'DUPLICATE_KEY':
-      return { wrong: `key ${word} is given twice`, expected: 'each key once' };
-    case 'MULTIPLE_DOCS':
-      return { wrong: 'a second document starts here', expected: 'one document, so no line "---" inside the file' };
-    case 'TAG_RESOLVE_FAILED':
-      return { wrong: `tag ${word} is not used here`, expected: 'the value without a tag' };
-    case 'BLOCK_AS_IMPLICIT_KEY':
-      return {
-        wrong: 'a key inside the value of another key',
-        expected: 'one key on each line; text with ": " in quotes',
-      };
-    case 'MISSING_CHAR':
-    case 'MULTILINE_IMPLICIT_KEY':
-    case 'BAD_INDENT':
-      return {
-        wrong: `broken YAML: ${sentence(error.message)}`,
-        expected: 'keys as "key: value", each bracket and quote closed',
-      };
-    default:
-      return {
-        wrong: `broken YAML: ${sentence(error.message)}`,
-        expected: 'valid YAML; text with special characters in quotes',
-      };
-  }
+interface Words {
+  readonly wrong: string;
+  readonly expected: string;
 }
 
-function sentence(message: string): string {
-  const line = message.split('\n', 1)[0] ?? '';
-  return line.charAt(0).toLowerCase() + line.slice(1);
+/** Messages of the YAML parser that keepers will meet, in words for somebody who has never read its grammar. */
+const KNOWN: readonly { readonly pattern: RegExp; readonly words: (match: RegExpExecArray, found: string) => Words }[] =
+  [
+    {
+      pattern: /^Tabs are not allowed/,
+      words: () => ({ wrong: 'a tab indents this line', expected: 'spaces' }),
+    },
+    {
+      pattern: /^Map keys must be unique/,
+      words: (_, found) => ({ wrong: `key ${found} is given twice`, expected: 'each key once' }),
+    },
+    {
+      pattern: /multiple documents/,
+      words: () => ({ wrong: 'a second document starts here', expected: 'no line "---" inside the file' }),
+    },
+    {
+      pattern: /^Unresolved tag/,
+      words: (_, found) => ({ wrong: `tag ${found} is not used here`, expected: 'the value without a tag' }),
+    },
+    {
+      pattern: /^Nested mappings are not allowed/,
+      words: () => ({
+        wrong: 'a key inside the value of another key',
+        expected: 'each key on a line of its own, or quotes around text that has ": " in it',
+      }),
+    },
+    {
+      pattern: /end with a ([\]}])|expected flow (?:map|sequence) to end/,
+      words: ([, bracket = ']']) => ({
+        wrong: 'a bracket is still open',
+        expected: `a "${bracket}" before this place`,
+      }),
+    },
+    {
+      pattern: /^Missing closing (.)quote/,
+      words: ([, quote = '"']) => ({
+        wrong: 'a quote is still open',
+        expected: `a closing ${quote} before this place`,
+      }),
+    },
+    {
+      pattern: /^Implicit (?:map )?keys need to be/,
+      words: () => ({ wrong: 'a line without "key: value"', expected: 'a colon and a blank after each key' }),
+    },
+    {
+      pattern: /^Invalid escape sequence (.+)/,
+      words: ([, sequence = '']) => ({
+        wrong: `"${sequence}" means nothing in double quotes`,
+        expected: 'single quotes, which keep a backslash',
+      }),
+    },
+    {
+      pattern: /^Plain value cannot start with/,
+      words: (_, found) => ({ wrong: `a value starts with ${found.charAt(0)}`, expected: 'quotes around it' }),
+    },
+  ];
+
+/** What is wrong and what was expected, for one error or warning of the parser. */
+export function yamlProblem(error: YAMLError, text: string): Words {
+  const found = /^[^\s:,[\]{}]+/.exec(text.slice(error.pos[0]))?.[0] ?? '';
+  for (const { pattern, words } of KNOWN) {
+    const match = pattern.exec(error.message);
+    if (match !== null) return words(match, found);
+  }
+  const line = error.message.split('\n', 1)[0] ?? '';
+  return {
+    wrong: `broken YAML: ${line.charAt(0).toLowerCase()}${line.slice(1)}`,
+    expected: 'valid YAML, with quotes around text that has special characters',
+  };
 }
