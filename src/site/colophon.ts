@@ -1,3 +1,4 @@
+import type { ScalarParameter } from '../cosmology/parameters.ts';
 import type { SiteSettings } from '../inputs/types.ts';
 import type { Stamp } from '../tables/types.ts';
 import { absoluteAddress } from './absoluteAddress.ts';
@@ -24,10 +25,14 @@ export interface Colophon {
     readonly source: string;
   }[];
   readonly method: string;
+  /** Address of the methods page. */
+  readonly methods: string;
   readonly file: { readonly name: string; readonly address: string; readonly checksum: string };
   readonly licence: SiteSettings['licence'];
   /** A sentence to copy. */
   readonly citation: string;
+  /** The stamp in short, for the foot of printed pages. Plain text. */
+  readonly foot: string;
 }
 
 /** `table` is the id of the table whose stamp it is, `page` the address of its page. */
@@ -55,12 +60,26 @@ export function colophon(site: SiteSettings, stamp: Stamp, state: ShownState, ta
       source: constant.source,
     })),
     method: stamp.method,
+    methods: address.methods(),
     file: { name: `${table}.csv`, address: address.csv(edition, table), checksum },
     licence: site.licence,
+    foot: foot(site, stamp, state, table),
     citation:
       `${site.group}: ${site.title}, edition ${edition}${state === 'released' ? '' : ` (${state})`}, ` +
       `table ${table}, SHA-256 ${checksum.slice(0, 12)}. ${absoluteAddress(site, page)}`,
   };
+}
+
+function foot(site: SiteSettings, { set, edition, method, checksum }: Stamp, state: ShownState, table: string): string {
+  const values = Object.entries(set.parameters).flatMap(([id, value]) => {
+    const u = set.uncertainties[id as ScalarParameter];
+    if (value === undefined) return [];
+    return [`${id} ${[value].flat().join(', ') || 'massless'}${u === undefined ? '' : ` ± ${u}`}`];
+  });
+  return (
+    `${site.title}, edition ${edition}${state === 'released' ? '' : ` (${state})`}. ${setTitle(set)}: ` +
+    `${values.join('; ')}. Method version ${method}. ${table}.csv, SHA-256 ${checksum}. ${site.licence.name}.`
+  );
 }
 
 function inline(latex: string): string {

@@ -10,6 +10,8 @@ import type { Stamp } from './types.ts';
 function derived(model: Background, digits: number): Stamp['derived'] {
   const today = densities(model, 1);
   const values = {
+    // As papers quote it: massive neutrinos included.
+    Omega_m: today.matter + today.massiveNeutrinos,
     Omega_bc: today.matter,
     Omega_gamma: today.photons,
     Omega_nu: today.neutrinos,

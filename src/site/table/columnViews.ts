@@ -34,12 +34,18 @@ export function columnViews(content: Content, table: Table): ColumnView[] {
     columnView(
       content,
       column,
+      table.redshifts,
       table.values.map((row) => row[i] ?? null),
     ),
   );
 }
 
-function columnView(content: Content, column: Column, values: readonly (number | null)[]): ColumnView {
+function columnView(
+  content: Content,
+  column: Column,
+  redshifts: readonly string[],
+  values: readonly (number | null)[],
+): ColumnView {
   const quantity = quantityText(content, column.id);
   const { exponent, cells } = pageColumn(values, PAGE_DIGITS);
   const power =
@@ -49,7 +55,7 @@ function columnView(content: Content, column: Column, values: readonly (number |
     name: quantity.name,
     symbol: symbolHtml(quantity),
     unit: [power, unitHtml(column.unit)].filter(Boolean).join('\u2009'),
-    curve: curvePath(values),
+    curve: curvePath(redshifts, values),
     definition: quantity.definition,
     formula: displayFormula(quantity.formula, `content/quantities/${column.id}.md`),
     address: address.quantity(column.id),

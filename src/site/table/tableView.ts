@@ -10,7 +10,7 @@ import { TOPIC_TEXT } from '../topicText.ts';
 import { cautions } from './cautions.ts';
 import { type ColumnView, columnViews } from './columnViews.ts';
 import { type RowView, rowViews } from './rowViews.ts';
-import { thumbIndex } from './thumbIndex.ts';
+import { type Thumb, thumbIndex } from './thumbIndex.ts';
 import { type TurnTo, turnTo } from './turnTo.ts';
 
 /** Everything a table page prints. */
@@ -23,7 +23,7 @@ export interface TableView {
   readonly grid: { readonly title: string; readonly extent: string };
   readonly columns: readonly ColumnView[];
   readonly groups: readonly (readonly RowView[])[];
-  readonly thumbs: readonly string[];
+  readonly thumbs: readonly Thumb[];
   /** HTML. */
   readonly cautions: readonly string[];
   readonly turnTo: TurnTo;

@@ -1,24 +1,42 @@
+import { rowId } from '../addresses.ts';
+import { realMinus } from '../writtenNumber.ts';
 import { lastPlace } from './roundness.ts';
 
-/** About as many as fit beside a table on a small screen. */
-const THUMBS = 16;
+/** One tab of the thumb index. */
+export interface Thumb {
+  readonly row: string;
+  readonly text: string;
+}
+
 /** Shorter tables are seen at once. */
 const SHORTEST = 60;
+/** Two tabs are at most this part of the table apart, so that about 16 fit beside it on a small screen. */
+const WIDEST_GAP = 1 / 12;
 
-/** The redshifts of the thumb index, as the grid writes them: one round value in each stretch of a long table. */
-export function thumbIndex(redshifts: readonly string[]): string[] {
+/** The tabs at the side of a long table: first row, last row, and between them round values spread over the rows. */
+export function thumbIndex(redshifts: readonly string[]): Thumb[] {
   if (redshifts.length < SHORTEST) return [];
-  const stretch = redshifts.length / THUMBS;
-  return Array.from({ length: THUMBS }, (_, i) =>
-    roundest(redshifts.slice(Math.round(i * stretch), Math.round((i + 1) * stretch))),
-  );
+  const places = redshifts.map(lastPlace);
+  const last = redshifts.length - 1;
+  const rows = [0, ...between(places, 0, last, redshifts.length * WIDEST_GAP), last];
+  return rows.map((row) => ({ row: rowId(redshifts[row] ?? ''), text: short(redshifts[row] ?? '') }));
 }
 
-function roundest(some: readonly string[]): string {
-  return some.reduce((best, one) => (roundness(one) > roundness(best) ? one : best));
+/** Rows between two tabs, halving the gap until it is narrow: the roundest value near the middle each time. */
+function between(places: readonly number[], from: number, to: number, widest: number): number[] {
+  const gap = to - from;
+  if (gap <= widest) return [];
+  const middle = from + gap / 2;
+  let best = Math.round(middle);
+  for (let row = Math.ceil(from + gap / 4); row <= to - gap / 4; row++) {
+    const rounder = (places[row] ?? 0) - (places[best] ?? 0);
+    const nearer = Math.abs(best - middle) - Math.abs(row - middle);
+    if (rounder > 0 || (rounder === 0 && nearer > 0)) best = row;
+  }
+  return [...between(places, from, best, widest), best, ...between(places, best, to, widest)];
 }
 
-/** Among values of the same last place, halves go before the others: 0.5 before 0.3. */
-function roundness(redshift: string): number {
-  return lastPlace(redshift) + (/5[0.]*$/.test(redshift) ? 0.5 : 0);
+/** "0.5" for 0.50. */
+function short(redshift: string): string {
+  return realMinus(redshift.includes('.') ? redshift.replace(/\.?0+$/, '') : redshift);
 }
