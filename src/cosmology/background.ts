@@ -19,6 +19,19 @@ export interface MassiveNeutrino {
   readonly y0: number;
 }
 
+/**
+ * Bounds on the relative rounding errors of the present densities, in units of the unit roundoff 2^-53. They count one
+ * unit for each operation and for each rounded constant on the way; see the functions that compute the densities.
+ */
+export interface DensityErrors {
+  readonly matter: number;
+  readonly photons: number;
+  readonly masslessNeutrinos: number;
+  readonly massiveNeutrinos: number;
+  readonly curvature: number;
+  readonly darkEnergy: number;
+}
+
 /** A homogeneous model ready for evaluation: present densities over the critical density, and the scales. */
 export interface Background {
   /** Hubble constant, km/s/Mpc. */
@@ -44,7 +57,15 @@ export interface Background {
   /** 1 + w0 + wa, from the decimals as written. */
   readonly onePlusW: number;
   readonly wa: number;
+  readonly errors: DensityErrors;
 }
+
+/** a_rad T^4: 5 roundings for k T/h, three times that and the powers of c and pi, and 3 H0^2/(8 pi G) twice over. */
+const PHOTON_ERROR = 70;
+/** The photons and the powers of 4/11. */
+const MASSLESS_ERROR = PHOTON_ERROR + 8;
+/** That, 18 for the tables of the relic energy, and 14 for y, on which it depends at most linearly. */
+const MASSIVE_ERROR = MASSLESS_ERROR + 32;
 
 const ONE = Decimal.parse('1');
 const HUNDRED_SQUARED = 1e4;
@@ -106,9 +127,12 @@ export function background(parameters: Parameters): Background {
   const photons = photonDensity(temperature, H0);
   const { allMassless, massiveNeutrinos, masslessNeutrinos } = neutrinos(parameters, temperature, photons);
   const massive = sum(massiveNeutrinos.map(presentDensity));
-  const { matter, rest } = matterAndRest(parameters, H0, massive);
+  const { matter, rest, matterError, restError } = matterAndRest(parameters, H0, massive);
   const closing = rest - (photons + masslessNeutrinos);
+  const closingError =
+    restError + PHOTON_ERROR * photons + MASSLESS_ERROR * masslessNeutrinos + (photons > 0 ? 2 * Math.abs(rest) : 0);
   const givesDarkEnergy = parameters.Omega_DE !== undefined;
+  const relative = (error: number, value: number) => (error === 0 ? 0 : error / Math.abs(value));
   const w0 = Decimal.parse(parameters.w0);
   return {
     H0,
@@ -125,17 +149,46 @@ export function background(parameters: Parameters): Background {
     onePlusW0: ONE.plus(w0).toNumber(),
     onePlusW: ONE.plus(w0).plus(Decimal.parse(parameters.wa)).toNumber(),
     wa: Number(parameters.wa),
+    errors: {
+      matter: relative(matterError, matter),
+      photons: PHOTON_ERROR,
+      masslessNeutrinos: MASSLESS_ERROR,
+      massiveNeutrinos: MASSIVE_ERROR,
+      curvature: givesDarkEnergy ? relative(closingError, closing) : 1,
+      darkEnergy: givesDarkEnergy ? 1 : relative(closingError, closing),
+    },
   };
 }
 
+interface MatterAndRest {
+  readonly matter: number;
+  readonly rest: number;
+  /** Bounds on the absolute rounding errors, in units of 2^-53. */
+  readonly matterError: number;
+  readonly restError: number;
+}
+
 /** Omega_bc, and what is left of 1 after all matter and after the given one of Omega_k and Omega_DE. */
-function matterAndRest(parameters: Parameters, H0: number, massive: number): { matter: number; rest: number } {
+function matterAndRest(parameters: Parameters, H0: number, massive: number): MatterAndRest {
   const given = ONE.minus(Decimal.parse(parameters.Omega_DE ?? parameters.Omega_k ?? '0'));
+  const massiveError = MASSIVE_ERROR * massive;
   if (parameters.Omega_m !== undefined) {
     const total = Decimal.parse(parameters.Omega_m);
-    return { matter: total.toNumber() - massive, rest: given.minus(total).toNumber() };
+    const rest = given.minus(total).toNumber();
+    return {
+      matter: total.toNumber() - massive,
+      rest,
+      matterError: massiveError + 2 * total.toNumber(),
+      restError: Math.abs(rest),
+    };
   }
   const physical = Decimal.parse(parameters.omega_b ?? '0').plus(Decimal.parse(parameters.omega_c ?? '0'));
   const matter = (physical.toNumber() * HUNDRED_SQUARED) / (H0 * H0);
-  return { matter, rest: given.toNumber() - matter - massive };
+  const matterError = 6 * matter;
+  return {
+    matter,
+    rest: given.toNumber() - matter - massive,
+    matterError,
+    restError: matterError + massiveError + 3 * Math.abs(given.toNumber()),
+  };
 }
