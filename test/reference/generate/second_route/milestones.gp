@@ -53,7 +53,7 @@ milestones() =
   put("z_largest_D_A", peak[1]); put("largest_D_A", scaled(peak[2], H));
   put("z_recession_c", recession(list));
   put("particle_horizon_today", scaled(conformal(0), H)); put("event_horizon_today", scaled(left(0), H));
-  printf("milestone\tfate\t%s\n", if (turn, "recollapses", E2(1000) > E2(100), "big rip", "expands forever"));
+  printf("milestone\tfate\t%s\n", if (turn, "recollapses", darkEnergy(10^6) > max(0, darkEnergy(10^5)), "big rip", "expands forever"));
   put("t_maximum", if (turn, (age(0) + toLast(0, 1))*time, nothing));
   put("t_crunch", if (turn, 2*(age(0) + toLast(0, 1))*time, nothing));
 }
