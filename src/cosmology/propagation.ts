@@ -1,0 +1,90 @@
+import { nonlinearPlaces } from './nonlinearity.ts';
+import type { ScalarParameter } from './parameters.ts';
+import { type Sensitivity, sensitivities } from './sensitivities.ts';
+import type { Sweep } from './sweep.ts';
+import { correlationMatrix, type UncertainParameters, uncertaintyOf } from './uncertain.ts';
+
+/** What one parameter contributes to u^2, as a part of the whole. */
+export interface Share {
+  readonly parameter: ScalarParameter;
+  /** (c u)^2 / u(y)^2: as if it were independent of the others. */
+  readonly alone: number;
+  /** c u / u(y)^2 times the sum of r c u over the others: what the correlations add or take away. */
+  readonly correlated: number;
+}
+
+/** Standard uncertainties of everything in a sweep, by place (see `cellPlace`, `milestonePlace`). */
+export interface Propagation {
+  readonly redshifts: readonly number[];
+  /** NaN where the value or a neighbour does not exist. */
+  readonly u: Sweep;
+  /** What each parameter contributes; `alone` and `correlated` of all add up to 1. None where u is 0 or not there. */
+  shares(place: number): readonly Share[];
+  /** Whether u departs from the spread that the formula itself gives by more than a tenth. */
+  isNonlinear(place: number): boolean;
+}
+
+/** Contributions that cancel to less than this of the largest are rounding of the derivatives. */
+const CANCELLED = 1e-9;
+
+/**
+ * Standard uncertainties by the law of propagation, u(y)^2 = sum over i, j of c_i u_i r_ij c_j u_j with the
+ * sensitivities c_i = dy/dx_i: u(y) = sqrt(J V J^T). Null for a set that gives no uncertainties.
+ *
+ * Source: JCGM 100:2008 (GUM), 5.1.2 and 5.2.2, eqs. 10 and 13 to 16.
+ */
+export function propagation(set: UncertainParameters, redshifts: readonly number[]): Propagation | null {
+  const found = sensitivities(set, redshifts);
+  const [first] = found;
+  if (first === undefined) return null;
+  const names = found.map(({ parameter }) => parameter);
+  const r = correlationMatrix(set, names);
+  const terms = found.map((sensitivity) => contribution(set, sensitivity));
+  const u = first.derivatives.map((_, place) => combined(termsAt(terms, place), r));
+  const nonlinear = nonlinearPlaces(set, redshifts, names, r, u);
+  return {
+    redshifts,
+    u,
+    shares: (place) => shares(names, termsAt(terms, place), r, u[place] as number),
+    isNonlinear: (place) => nonlinear[place] === 1,
+  };
+}
+
+/** c u of one parameter, for everything. */
+function contribution(set: UncertainParameters, { parameter, derivatives }: Sensitivity): Sweep {
+  const u = uncertaintyOf(set, parameter);
+  return derivatives.map((c) => c * u);
+}
+
+function termsAt(terms: readonly Sweep[], place: number): readonly number[] {
+  return terms.map((term) => term[place] as number);
+}
+
+type Matrix = readonly (readonly number[])[];
+
+/** sqrt(t R t^T). */
+function combined(terms: readonly number[], r: Matrix): number {
+  let square = 0;
+  let largest = 0;
+  for (const [i, term] of terms.entries()) {
+    square += term * term + term * correlatedWith(terms, r, i);
+    largest = Math.max(largest, Math.abs(term)); // NaN stays NaN
+  }
+  const limit = CANCELLED * largest;
+  return square <= limit * limit ? 0 : Math.sqrt(square);
+}
+
+/** The sum of r_ij t_j over the others. */
+function correlatedWith(terms: readonly number[], r: Matrix, i: number): number {
+  let sum = 0;
+  for (const [j, other] of terms.entries()) if (j !== i) sum += (r[i]?.[j] as number) * other;
+  return sum;
+}
+
+function shares(names: readonly ScalarParameter[], terms: readonly number[], r: Matrix, u: number): readonly Share[] {
+  if (!(u > 0)) return [];
+  return names.map((parameter, i) => {
+    const term = terms[i] as number;
+    return { parameter, alone: (term * term) / (u * u), correlated: (term * correlatedWith(terms, r, i)) / (u * u) };
+  });
+}
