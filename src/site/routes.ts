@@ -1,3 +1,4 @@
+import { editionFiles } from '../tables/editionFiles.ts';
 import { press } from './press.ts';
 
 /** One page for each table of each edition. */
@@ -11,12 +12,12 @@ export async function tableRoutes() {
   );
 }
 
-/** One file for each table and for the milestones of each set. */
+/** One file for each table, for its uncertainties where it has any, and for the milestones of each set. */
 export async function csvRoutes() {
   const { editions } = await press();
-  return editions.flatMap(({ edition, tables, milestones }) =>
-    [...tables, ...milestones].map(({ id, csv }) => ({
-      params: { edition: edition.number, file: id },
+  return editions.flatMap((pressed) =>
+    editionFiles(pressed).map(({ id, csv }) => ({
+      params: { edition: pressed.edition.number, file: id },
       props: { csv },
     })),
   );

@@ -1,5 +1,6 @@
 import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { editionFiles } from './editionFiles.ts';
 import type { EditionTables } from './types.ts';
 import { tablesFolder } from './writeTables.ts';
 
@@ -7,7 +8,7 @@ import { tablesFolder } from './writeTables.ts';
 export function differingTables(folder: string, editions: readonly EditionTables[]): readonly string[] {
   return editions.flatMap((pressed) => {
     const place = tablesFolder(pressed.edition.number);
-    const wanted = new Map([...pressed.tables, ...pressed.milestones].map(({ id, csv }) => [`${id}.csv`, csv]));
+    const wanted = new Map(editionFiles(pressed).map(({ id, csv }) => [`${id}.csv`, csv]));
     const names = new Set([...wanted.keys(), ...csvFiles(join(folder, place))]);
     return [...names]
       .filter((name) => textOf(join(folder, place, name)) !== wanted.get(name))

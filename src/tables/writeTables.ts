@@ -1,5 +1,6 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { editionFiles } from './editionFiles.ts';
 import type { EditionTables } from './types.ts';
 
 /** Where the files of an edition stand below the output folder. */
@@ -11,7 +12,7 @@ export function tablesFolder(number: string): string {
 export function writeTables(folder: string, pressed: EditionTables): number {
   const target = join(folder, tablesFolder(pressed.edition.number));
   mkdirSync(target, { recursive: true });
-  const files = [...pressed.tables, ...pressed.milestones];
+  const files = editionFiles(pressed);
   for (const { id, csv } of files) writeFileSync(join(target, `${id}.csv`), csv);
   return files.length;
 }
