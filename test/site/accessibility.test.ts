@@ -1,26 +1,32 @@
 import { AxeBuilder } from '@axe-core/playwright';
-import { describe, expect, test } from 'vitest';
+import type { BrowserContext, Page } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { newContext, site } from './harness.ts';
 import { samplePages } from './pages.ts';
 
-const WIDTHS = { phone: 390, desk: 1280 } as const;
+const VIEWS = [
+  { colorScheme: 'light', width: 1280 },
+  { colorScheme: 'light', width: 390 },
+  { colorScheme: 'dark', width: 390 },
+  { colorScheme: 'dark', width: 1280 },
+] as const;
 
-describe.each(['light', 'dark'] as const)('in %s colours', (colorScheme) => {
-  describe.each(Object.entries(WIDTHS))('on a %s', (_, width) => {
-    test.each(samplePages())('%j has no accessibility violation', async (path) => {
-      const context = await newContext({ colorScheme, viewport: { width, height: 800 }, reducedMotion: 'reduce' });
-      const page = await context.newPage();
-      await page.goto(site.address + path);
-      const { violations } = await new AxeBuilder({ page }).analyze();
-      await context.close();
-      const found = violations.map(
-        ({ id, nodes }) =>
-          `${id}: ${nodes
-            .slice(0, 3)
-            .map((node) => node.html)
-            .join('\n')}`,
-      );
-      expect(found).toEqual([]);
-    });
+let context: BrowserContext;
+let page: Page;
+
+beforeAll(async () => {
+  context = await newContext({ reducedMotion: 'reduce' });
+  page = await context.newPage();
+});
+afterAll(() => context.close());
+
+describe.each(VIEWS)('in $colorScheme colours, $width pixels wide', ({ colorScheme, width }) => {
+  test.each(samplePages())('%j has no accessibility violation', async (path) => {
+    await page.emulateMedia({ colorScheme });
+    await page.setViewportSize({ width, height: 800 });
+    await page.goto(site.address + path);
+    // Legacy mode only gives up frames of other origins, and this site has no frames.
+    const { violations } = await new AxeBuilder({ page }).setLegacyMode().analyze();
+    expect(violations.flatMap(({ id, nodes }) => nodes.map(({ html }) => `${id}: ${html}`))).toEqual([]);
   });
 });
