@@ -90,6 +90,13 @@ export function startTableTools(tools: HTMLElement, table: HTMLTableElement): vo
     part('.columns summary').focus();
   });
   addEventListener('hashchange', arrive);
+  // What is said of a redshift between two rows lies over the page, see tools.css; it goes when it has been read.
+  addEventListener('keydown', ({ key }) => {
+    if (key === 'Escape') said.replaceChildren();
+  });
+  addEventListener('pointerdown', ({ target }) => {
+    if (target instanceof Node && !said.contains(target)) said.replaceChildren();
+  });
 
   const index = document.querySelector<HTMLElement>('.thumbs');
   if (index) startThumbs(parts, index);
