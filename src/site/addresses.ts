@@ -24,7 +24,9 @@ export const address = {
   quantities: () => folder('quantities'),
   quantity: (column: string) => folder('quantities', column),
   methods: () => folder('methods'),
+  checkedAgainst: () => folder('checked-against'),
   search: () => folder('search'),
+  icon: () => `${base}favicon.svg`,
   searchIndex: () => `${base}search-index.json`,
 } as const;
 

@@ -8,6 +8,8 @@ export interface Frame {
   readonly site: SiteSettings;
   readonly home: string;
   readonly links: readonly { readonly text: string; readonly address: string; readonly here: boolean }[];
+  /** Published values beside ours. */
+  readonly checked: string;
   readonly current: { readonly number: string; readonly address: string };
 }
 
@@ -25,6 +27,7 @@ export async function frame(place?: string): Promise<Frame> {
       address: address[link](),
       here: link === place,
     })),
+    checked: address.checkedAgainst(),
     current: { number, address: address.edition(number) },
   };
 }

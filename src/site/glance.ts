@@ -3,30 +3,31 @@ import type { ParameterSet } from '../inputs/types.ts';
 import { pageColumn, pageNumber } from '../tables/pageCells.ts';
 import type { EditionTables } from '../tables/types.ts';
 import { address } from './addresses.ts';
+import { alignPoints } from './alignPoints.ts';
 import { byKind, type KindGroup } from './kindText.ts';
 import { derivedOf, milestone, milestonesOf, setsOf, tablesOf, valueAt } from './lookUp.ts';
 import { isUnchecked } from './setCautions.ts';
 import { setTitle } from './setTitle.ts';
-import { writtenNumber } from './writtenNumber.ts';
+import { realMinus } from './writtenNumber.ts';
 
 /** One parameter set with the numbers people compare first. */
 export interface GlanceRow {
   readonly title: string;
   readonly address: string;
   readonly unchecked: boolean;
-  /** HTML, one for each of GLANCE_HEADS. */
+  /** HTML, one for each span of GLANCE_HEADS. */
   readonly cells: readonly string[];
 }
 
-/** Heads of the columns: HTML symbol, unit, and words for those who listen. */
+/** Heads of the columns: HTML symbol, unit, and words for those who listen; two spans hold a value and its uncertainty. */
 export const GLANCE_HEADS = [
-  { symbol: '<i>H</i><sub>0</sub>', unit: 'km s<sup>−1</sup> Mpc<sup>−1</sup>', name: 'Hubble constant' },
-  { symbol: 'Ω<sub>m</sub>', unit: '', name: 'matter density' },
-  { symbol: '<i>w</i><sub>0</sub>, <i>w<sub>a</sub></i>', unit: '', name: 'dark energy equation of state' },
-  { symbol: '<i>t</i><sub>0</sub>', unit: 'Gyr', name: 'age today' },
-  { symbol: '<i>z</i><sub>eq</sub>', unit: '', name: 'redshift of matter-radiation equality' },
-  { symbol: '<i>D<sub>M</sub></i>(1)', unit: 'Mpc', name: 'transverse comoving distance to z = 1' },
-  { symbol: '<i>t</i>(1)', unit: 'Gyr', name: 'age at z = 1' },
+  { symbol: '<i>H</i><sub>0</sub>', unit: 'km s<sup>−1</sup> Mpc<sup>−1</sup>', name: 'Hubble constant', span: 2 },
+  { symbol: 'Ω<sub>m</sub>', unit: '', name: 'matter density', span: 2 },
+  { symbol: '<i>w</i><sub>0</sub>, <i>w<sub>a</sub></i>', unit: '', name: 'dark energy equation of state', span: 1 },
+  { symbol: '<i>t</i><sub>0</sub>', unit: 'Gyr', name: 'age today', span: 1 },
+  { symbol: '<i>z</i><sub>eq</sub>', unit: '', name: 'redshift of matter-radiation equality', span: 1 },
+  { symbol: '<i>D<sub>M</sub></i>(1)', unit: 'Mpc', name: 'transverse comoving distance to z = 1', span: 1 },
+  { symbol: '<i>t</i>(1)', unit: 'Gyr', name: 'age at z = 1', span: 1 },
 ] as const;
 
 /** Digits of the computed numbers: enough to tell the sets apart. */
@@ -35,7 +36,12 @@ const DIGITS = 4;
 /** The sets of an edition at a glance, by kind. */
 export function glance(pressed: EditionTables): KindGroup<GlanceRow>[] {
   const sets = setsOf(pressed);
-  const computed = [
+  const columns = [
+    alignPoints(sets.map(({ parameters }) => parameters.H0)),
+    sets.map(({ uncertainties }) => plusMinus(uncertainties.H0)),
+    alignPoints(sets.map((set) => set.parameters.Omega_m ?? derivedMatter(pressed, set.id))),
+    sets.map(({ uncertainties }) => plusMinus(uncertainties.Omega_m)),
+    sets.map(equationOfState),
     column(sets, (set) => milestoneValue(pressed, set, 'age_today')),
     column(sets, (set) => milestoneValue(pressed, set, 'z_equality')),
     column(sets, (set) => valueAt(tablesOf(pressed, set.id, 'distances'), 'D_M_Mpc', 1)),
@@ -47,29 +53,25 @@ export function glance(pressed: EditionTables): KindGroup<GlanceRow>[] {
       title: setTitle(set),
       address: address.set(pressed.edition.number, set.id),
       unchecked: isUnchecked(set),
-      cells: [...given(pressed, set), ...computed.map((cells) => cells[i] ?? '')],
+      cells: columns.map((cells) => cells[i] ?? ''),
     },
   }));
   return byKind(rows, ({ set }) => set).map(({ kind, members }) => ({ kind, members: members.map(({ row }) => row) }));
 }
 
-/** H0, matter and equation of state as written; the matter density is computed where physical densities stand for it. */
-function given(pressed: EditionTables, { id, parameters, uncertainties }: ParameterSet): string[] {
-  const { H0, Omega_m, w0, wa } = parameters;
-  return [
-    writtenNumber(H0) + uncertainty(uncertainties.H0),
-    Omega_m === undefined ? derivedMatter(pressed, id) : writtenNumber(Omega_m) + uncertainty(uncertainties.Omega_m),
-    Number(w0) === -1 && Number(wa) === 0 ? '' : `${writtenNumber(w0)}, ${writtenNumber(wa)}`,
-  ];
+/** Blank for a cosmological constant. */
+function equationOfState({ parameters: { w0, wa } }: ParameterSet): string {
+  return Number(w0) === -1 && Number(wa) === 0 ? '' : `${realMinus(w0)}, ${realMinus(wa)}`;
 }
 
+/** Computed where physical densities stand for it. */
 function derivedMatter(pressed: EditionTables, set: string): string {
   const matter = derivedOf(pressed, set).find(({ name }) => name === 'Omega_m');
   return matter ? pageNumber(Number(matter.value), DIGITS) : '';
 }
 
-function uncertainty(u: string | undefined): string {
-  return u === undefined ? '' : `<span class="u"> ± ${writtenNumber(u)}</span>`;
+function plusMinus(u: string | undefined): string {
+  return u === undefined ? '' : `± ${u}`;
 }
 
 function milestoneValue(pressed: EditionTables, set: ParameterSet, name: MilestoneName): number | null {

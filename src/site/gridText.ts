@@ -1,8 +1,7 @@
 import type { RedshiftGrid } from '../inputs/types.ts';
-import { realMinus } from './writtenNumber.ts';
+import { shortRedshift } from './shortRedshift.ts';
 
 /** "371 redshifts from 0 to 10". */
 export function gridExtent({ redshifts }: RedshiftGrid): string {
-  const short = (z: string | undefined) => realMinus(String(Number(z)));
-  return `${redshifts.length} redshifts from ${short(redshifts[0])} to ${short(redshifts.at(-1))}`;
+  return `${redshifts.length} redshifts from ${shortRedshift(redshifts[0] ?? '')} to ${shortRedshift(redshifts.at(-1) ?? '')}`;
 }

@@ -3,7 +3,7 @@ import type { ParameterSet } from '../inputs/types.ts';
 import { renderFormula } from './formula.ts';
 import { PARAMETER_TEXT } from './parameterText.ts';
 import { unitHtml } from './unitText.ts';
-import { writtenNumber } from './writtenNumber.ts';
+import { realMinus } from './writtenNumber.ts';
 
 /** One parameter of a set, ready to print; all parts are HTML. */
 export interface ParameterLine {
@@ -30,7 +30,7 @@ export function parameterLines({ parameters, uncertainties }: ParameterSet): Par
         symbol: parameterSymbol(symbol),
         name,
         value: valueHtml(value),
-        u: u === undefined ? '' : writtenNumber(u),
+        u: u === undefined ? '' : realMinus(u),
         unit: unitHtml(unit),
       },
     ];
@@ -38,8 +38,8 @@ export function parameterLines({ parameters, uncertainties }: ParameterSet): Par
 }
 
 function valueHtml(value: string | readonly string[]): string {
-  if (typeof value === 'string') return writtenNumber(value);
-  return value.length === 0 ? 'all massless' : value.map(writtenNumber).join(', ');
+  if (typeof value === 'string') return realMinus(value);
+  return value.length === 0 ? 'all massless' : value.map(realMinus).join(', ');
 }
 
 function parameterSymbol(latex: string): string {

@@ -18,7 +18,7 @@ export const PARAMETER_TEXT: Readonly<Record<keyof Parameters, ParameterText>> =
   Omega_k: { symbol: '\\Omega_k', name: 'Curvature', unit: '' },
   Omega_DE: { symbol: '\\Omega_{\\mathrm{DE}}', name: 'Dark energy', unit: '' },
   w0: { symbol: 'w_0', name: 'Dark energy equation of state today', unit: '' },
-  wa: { symbol: 'w_a', name: 'Its change, w = w0 + wa (1 \u2212 a)', unit: '' },
+  wa: { symbol: 'w_a', name: 'Slope of w against 1 − a', unit: '' },
   T_CMB: { symbol: 'T_{\\mathrm{CMB}}', name: 'Temperature of the microwave background', unit: 'K' },
   N_eff: { symbol: 'N_{\\mathrm{eff}}', name: 'Effective number of neutrino species', unit: '' },
   m_nu: { symbol: 'm_\\nu', name: 'Neutrino masses', unit: 'eV' },

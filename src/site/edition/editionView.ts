@@ -6,6 +6,7 @@ import { type ShownState, shownState } from '../currentEdition.ts';
 import { gridExtent } from '../gridText.ts';
 import { byKind, type KindGroup } from '../kindText.ts';
 import { setsOf } from '../lookUp.ts';
+import { noteHtml } from '../noteHtml.ts';
 import type { Press } from '../press.ts';
 import { type RunningHead, runningHead } from '../runningHead.ts';
 
@@ -24,6 +25,7 @@ export interface EditionView {
     readonly id: string;
     readonly title: string;
     readonly extent: string;
+    /** HTML. */
     readonly note: string;
   }[];
   readonly chapters: readonly KindGroup<Chapter>[];
@@ -43,7 +45,12 @@ export function editionView(press: Press, pressed: EditionTables): EditionView {
     supersedes: supersedes(press, edition),
     errata: edition.errata,
     digits: edition.digits,
-    grids: grids.map((grid) => ({ id: grid.id, title: grid.title, extent: gridExtent(grid), note: grid.note ?? '' })),
+    grids: grids.map((grid) => ({
+      id: grid.id,
+      title: grid.title,
+      extent: gridExtent(grid),
+      note: noteHtml(grid.note ?? ''),
+    })),
     chapters: byKind(contents(pressed), ({ id }) => {
       const set = sets.get(id);
       if (!set) throw new Error(`Edition ${edition.number} has no parameter set ${id}.`);

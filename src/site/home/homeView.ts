@@ -39,7 +39,7 @@ export async function homeView(): Promise<HomeView> {
       address: address.edition(edition.number),
       size: size(current),
     },
-    rulers: rulers(current),
+    rulers: rulers(pressed.content, current),
     glance: glance(current),
     chapters: contents(current),
   };

@@ -31,6 +31,8 @@ export interface Plot {
 /** Units of the drawing, in which paths are whole numbers. */
 export const SPAN = 2000;
 const POINTS = 120;
+/** Letters of a label. */
+const LABEL = 30;
 
 /** Undefined where no grid suits a drawing, or the column exists in no set. */
 export function plot(pressed: EditionTables, { id, topic }: Column): Plot | undefined {
@@ -57,7 +59,7 @@ export function plot(pressed: EditionTables, { id, topic }: Column): Plot | unde
       return [
         {
           title: setTitle(curve.set),
-          label: setTitle(curve.set).split(',')[0] ?? '',
+          label: shortTitle(setTitle(curve.set)),
           letter: String.fromCharCode(97 + i),
           path: path(
             curve.z.map(horizontal.position),
@@ -68,6 +70,12 @@ export function plot(pressed: EditionTables, { id, topic }: Column): Plot | unde
       ];
     }),
   };
+}
+
+/** The first words of a title, as many as fit beside a plot. */
+function shortTitle(title: string): string {
+  const first = title.split(',')[0] ?? '';
+  return first.length <= LABEL ? first : `${first.slice(0, first.lastIndexOf(' ', LABEL))} …`;
 }
 
 function path(across: readonly number[], up: readonly (number | null)[]): string {

@@ -25,7 +25,7 @@ export interface QuantityView {
   readonly topic: string;
   readonly definition: string;
   readonly formula: string;
-  readonly symbols: readonly { readonly symbol: string; readonly meaning: string; readonly unit: string }[];
+  readonly symbols: readonly { readonly symbol: string; readonly meaning: string }[];
   readonly body: string;
   readonly source: string;
   readonly alsoCalled: readonly string[];
@@ -54,8 +54,7 @@ export function quantityView(press: Press, id: string): QuantityView {
     formula: displayFormula(quantity.formula, where),
     symbols: quantity.symbols.map(({ symbol, meaning, unit }) => ({
       symbol: renderFormula(symbol, 'inline', where),
-      meaning: typographic(meaning),
-      unit: unitHtml(unit),
+      meaning: typographic(meaning) + (unit === '' ? '' : `, ${unitHtml(unit)}`),
     })),
     body: renderMarkdown(quantity.body, { where, link: quantityLink }),
     source: quantity.source,

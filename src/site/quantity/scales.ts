@@ -1,5 +1,5 @@
 import { scaleLinear, scaleLog } from 'd3-scale';
-import { realMinus } from '../writtenNumber.ts';
+import { writtenNumber } from '../writtenNumber.ts';
 
 /** A stroke on an axis; `at` runs from 0 (left, bottom) to 1. */
 export interface Tick {
@@ -28,7 +28,9 @@ function linear(lowest: number, highest: number, count: number): Axis {
   const format = scale.tickFormat(count);
   return {
     position: scale,
-    ticks: scale.ticks(count).map((value) => ({ at: scale(value), text: realMinus(format(value)) })),
+    ticks: scale
+      .ticks(count)
+      .map((value) => ({ at: scale(value), text: writtenNumber(format(value).replace('−', '-').replaceAll(',', '')) })),
   };
 }
 

@@ -1,10 +1,10 @@
 import type { Parameters } from '../../cosmology/parameters.ts';
 import type { ParameterSet } from '../../inputs/types.ts';
-import { pageColumn } from '../../tables/pageCells.ts';
+import { pageColumn, pageNumber } from '../../tables/pageCells.ts';
 import type { EditionTables } from '../../tables/types.ts';
 import { address } from '../addresses.ts';
 import { renderFormula } from '../formula.ts';
-import { milestone, milestonesOf, setsOf, tablesOf, valueAt } from '../lookUp.ts';
+import { derivedOf, milestone, milestonesOf, setsOf, tablesOf, valueAt } from '../lookUp.ts';
 import { type ParameterLine, parameterLines } from '../parameterLines.ts';
 import { PARAMETER_TEXT } from '../parameterText.ts';
 import { setTitle } from '../setTitle.ts';
@@ -19,6 +19,7 @@ export interface BesideOthers {
 
 const DITTO = '″';
 const DIGITS = 5;
+const MATTER_DIGITS = 4;
 
 export function besideOthers(pressed: EditionTables, own: ParameterSet): BesideOthers {
   const sets = [own, ...setsOf(pressed).filter(({ id }) => id !== own.id)];
@@ -44,7 +45,11 @@ export function besideOthers(pressed: EditionTables, own: ParameterSet): BesideO
       title: setTitle(set),
       address: address.set(pressed.edition.number, set.id),
       cells: [
-        ...ids.map((id) => cell(valueIn(lines[i] ?? [], id), valueIn(lines[0] ?? [], id), i === 0)),
+        ...ids.map((id) => {
+          const value = valueIn(lines[i] ?? [], id);
+          if (id === 'Omega_m' && value === '') return `<i>${derivedMatter(pressed, set)}</i>`;
+          return cell(value, valueIn(lines[0] ?? [], id), i === 0);
+        }),
         ages[i] ?? '',
         distances[i] ?? '',
       ],
@@ -58,6 +63,11 @@ function cell(value: string, own: string, first: boolean): string {
 
 function valueIn(lines: readonly ParameterLine[], id: keyof Parameters): string {
   return lines.find((line) => line.id === id)?.value ?? '';
+}
+
+function derivedMatter(pressed: EditionTables, { id }: ParameterSet): string {
+  const matter = derivedOf(pressed, id).find(({ name }) => name === 'Omega_m');
+  return matter ? pageNumber(Number(matter.value), MATTER_DIGITS) : '';
 }
 
 function numberOrNull(value: number | string | null | undefined): number | null {

@@ -22,14 +22,14 @@ export interface MilestoneLine {
 export function milestoneLines({ milestones }: MilestoneTable): { lines: MilestoneLine[]; missing: string[] } {
   const exist = milestones.filter(({ value }) => value !== null);
   return {
-    lines: exist.map(({ name, value, unit }) => {
+    lines: exist.map(({ name, value, unit, audited }) => {
       const text = MILESTONE_TEXT[name];
       return {
         id: name,
         name: text.name,
         symbol: text.symbol === undefined ? '' : renderFormula(text.symbol, 'inline', 'src/site/milestoneText.ts'),
         definition: text.definition,
-        value: typeof value === 'number' ? pageNumber(value, PAGE_DIGITS) : (value ?? ''),
+        value: typeof value === 'number' ? pageNumber(value, PAGE_DIGITS, audited) : (value ?? ''),
         unit: unitHtml(unit),
         address: address.quantity(text.quantity),
       };

@@ -1,10 +1,13 @@
 import type { ParameterSet, Source } from '../../inputs/types.ts';
+import { pageNumber } from '../../tables/pageCells.ts';
 import type { EditionTables } from '../../tables/types.ts';
 import { address } from '../addresses.ts';
 import { type ContentsLine, contentsLines } from '../contents.ts';
 import { shownState } from '../currentEdition.ts';
 import { renderFormula } from '../formula.ts';
 import { derivedOf, milestonesOf } from '../lookUp.ts';
+import { noteHtml } from '../noteHtml.ts';
+import { PAGE_DIGITS } from '../pageDigits.ts';
 import { type ParameterLine, parameterLines } from '../parameterLines.ts';
 import { PARAMETER_TEXT } from '../parameterText.ts';
 import type { Press } from '../press.ts';
@@ -12,8 +15,7 @@ import { type RunningHead, runningHead } from '../runningHead.ts';
 import { isUnchecked, uncertaintySentence } from '../setCautions.ts';
 import { setTitle } from '../setTitle.ts';
 import { symbolOfName } from '../symbolOfName.ts';
-import { typographic } from '../typographic.ts';
-import { realMinus, writtenNumber } from '../writtenNumber.ts';
+import { realMinus } from '../writtenNumber.ts';
 import { type BesideOthers, besideOthers } from './besideOthers.ts';
 import { type MilestoneLine, milestoneLines } from './milestoneLines.ts';
 
@@ -27,7 +29,7 @@ export interface SetView {
   readonly unchecked: boolean;
   /** HTML. */
   readonly uncertainty: string;
-  /** Paragraphs. */
+  /** Paragraphs of HTML. */
   readonly note: readonly string[];
   readonly parameters: readonly ParameterLine[];
   readonly derived: readonly { readonly symbol: string; readonly value: string }[];
@@ -53,11 +55,11 @@ export function setView(press: Press, pressed: EditionTables, id: string): SetVi
     doiAddress: set.source.doi && `https://doi.org/${set.source.doi}`,
     unchecked: isUnchecked(set),
     uncertainty: uncertaintySentence(set),
-    note: (set.note ?? '').split(/\n+/).filter(Boolean).map(typographic),
+    note: (set.note ?? '').split(/\n+/).filter(Boolean).map(noteHtml),
     parameters: parameterLines(set),
     derived: derivedOf(pressed, id).map(({ name, value }) => ({
       symbol: renderFormula(symbolOfName(name), 'inline', 'stamp'),
-      value: writtenNumber(value),
+      value: pageNumber(Number(value), PAGE_DIGITS),
     })),
     correlations: set.correlations.map(
       ([one, other, r]) => `<i>r</i>(${symbol(one)}, ${symbol(other)}) = ${realMinus(r)}`,

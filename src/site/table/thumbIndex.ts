@@ -1,5 +1,5 @@
 import { rowId } from '../addresses.ts';
-import { realMinus } from '../writtenNumber.ts';
+import { shortRedshift } from '../shortRedshift.ts';
 import { lastPlace } from './roundness.ts';
 
 /** One tab of the thumb index. */
@@ -19,7 +19,7 @@ export function thumbIndex(redshifts: readonly string[]): Thumb[] {
   const places = redshifts.map(lastPlace);
   const last = redshifts.length - 1;
   const rows = [0, ...between(places, 0, last, redshifts.length * WIDEST_GAP), last];
-  return rows.map((row) => ({ row: rowId(redshifts[row] ?? ''), text: short(redshifts[row] ?? '') }));
+  return rows.map((row) => ({ row: rowId(redshifts[row] ?? ''), text: shortRedshift(redshifts[row] ?? '') }));
 }
 
 /** Rows between two tabs, halving the gap until it is narrow: the roundest value near the middle each time. */
@@ -34,9 +34,4 @@ function between(places: readonly number[], from: number, to: number, widest: nu
     if (rounder > 0 || (rounder === 0 && nearer > 0)) best = row;
   }
   return [...between(places, from, best, widest), best, ...between(places, best, to, widest)];
-}
-
-/** "0.5" for 0.50. */
-function short(redshift: string): string {
-  return realMinus(redshift.includes('.') ? redshift.replace(/\.?0+$/, '') : redshift);
 }
