@@ -1,4 +1,5 @@
 import { CONSTANTS } from '../cosmology/constants.ts';
+import { address } from './addresses.ts';
 import { renderFormula } from './formula.ts';
 import { renderMarkdown } from './markdown.ts';
 import { MODEL_TEXT } from './methods/modelText.ts';
@@ -33,8 +34,13 @@ export function methodSections(): readonly MethodSection[] {
 }
 
 function section({ id, title, body, lists }: MethodText): MethodSection {
-  const html = renderMarkdown(body, { where: `src/site/methods, section ${id}`, link: quantityLink });
+  const html = renderMarkdown(body, { where: `src/site/methods, section ${id}`, link: methodLink });
   return { id, title, html, ...(lists === 'constants' ? { constants: constantLines() } : {}) };
+}
+
+/** A column, or the page of published values. */
+function methodLink(target: string): string | undefined {
+  return target === 'checked-against' ? address.checkedAgainst() : quantityLink(target);
 }
 
 function constantLines(): readonly ConstantLine[] {

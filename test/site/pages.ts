@@ -46,6 +46,7 @@ export const TEMPLATES = {
   quantities: /^quantities\/$/,
   quantity: /^quantities\/[^/]+\/$/,
   methods: /^methods\/$/,
+  checkedAgainst: /^checked-against\/$/,
   search: /^search\/$/,
   notFound: /^404\.html$/,
 } as const;

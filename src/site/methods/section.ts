@@ -3,7 +3,7 @@ export interface MethodText {
   /** Anchor on the page. */
   readonly id: string;
   readonly title: string;
-  /** Markdown with formulas; `[text](D_L_Mpc)` leads to a quantity, `[text](#blanks)` to a section. ASCII. */
+  /** Markdown with formulas; `[text](D_L_Mpc)` leads to a quantity, `[text](#blanks)` to a section, `[text](checked-against)` to that page. ASCII. */
   readonly body: string;
   /** What the program lists below the text. */
   readonly lists?: 'constants';

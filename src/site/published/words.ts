@@ -43,11 +43,14 @@ export const TOLERANCE_GROUNDS = [
 ] as const;
 export type ToleranceGround = (typeof TOLERANCE_GROUNDS)[number];
 
-/** The same, as a page says it. */
-export const GROUND_TEXT: Readonly<Record<ToleranceGround, string>> = {
-  'printed digits': 'half a unit of its last digit',
-  'input digits': 'half a unit of the last digit of each input',
-  'mean of chains': 'what a mean over chains may differ from the value at the mean parameters',
-  'round statement': 'a round statement',
-  'double precision': 'double precision',
+/** The same, as a page says it, with the letter that stands for it beside a tolerance. */
+export const GROUND_TEXT: Readonly<Record<ToleranceGround, { readonly letter: string; readonly text: string }>> = {
+  'printed digits': { letter: 'a', text: 'half a unit of the last printed digit' },
+  'input digits': { letter: 'b', text: 'what half a unit of the last digit of each input makes' },
+  'mean of chains': {
+    letter: 'c',
+    text: 'the published value is a mean over a distribution, which differs from the value at the mean parameters',
+  },
+  'round statement': { letter: 'd', text: 'a round statement; the line gives the reason' },
+  'double precision': { letter: 'e', text: 'an identity, limited by double precision' },
 };
