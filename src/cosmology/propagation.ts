@@ -1,7 +1,8 @@
-import { nonlinearPlaces } from './nonlinearity.ts';
+import { isNonlinear, spread } from './nonlinearity.ts';
 import type { ScalarParameter } from './parameters.ts';
 import { type Sensitivity, sensitivities } from './sensitivities.ts';
-import type { Sweep } from './sweep.ts';
+import { placeAmong, type Sweep } from './sweep.ts';
+import { thinned } from './thinned.ts';
 import { correlationMatrix, type UncertainParameters, uncertaintyOf } from './uncertain.ts';
 
 /** What one parameter contributes to u^2, as a part of the whole. */
@@ -20,7 +21,7 @@ export interface Propagation {
   readonly u: Sweep;
   /** What each parameter contributes; `alone` and `correlated` of all add up to 1. None where u is 0 or not there. */
   shares(place: number): readonly Share[];
-  /** Whether u departs from the spread that the formula itself gives by more than a tenth. */
+  /** Whether u departs by more than a tenth from the spread of y for normally distributed parameters. */
   isNonlinear(place: number): boolean;
 }
 
@@ -29,7 +30,7 @@ const CANCELLED = 1e-9;
 
 /**
  * Standard uncertainties by the law of propagation, u(y)^2 = sum over i, j of c_i u_i r_ij c_j u_j with the
- * sensitivities c_i = dy/dx_i: u(y) = sqrt(J V J^T). Null for a set that gives no uncertainties.
+ * sensitivities c_i = dy/dx_i: u(y) = sqrt(J V J^T). Null for a set that gives no uncertainties. Redshifts ascend.
  *
  * Source: JCGM 100:2008 (GUM), 5.1.2 and 5.2.2, eqs. 10 and 13 to 16.
  */
@@ -41,12 +42,26 @@ export function propagation(set: UncertainParameters, redshifts: readonly number
   const r = correlationMatrix(set, names);
   const terms = found.map((sensitivity) => contribution(set, sensitivity));
   const u = first.derivatives.map((_, place) => combined(termsAt(terms, place), r));
-  const nonlinear = nonlinearPlaces(set, redshifts, names, r, u);
   return {
     redshifts,
     u,
     shares: (place) => shares(names, termsAt(terms, place), r, u[place] as number),
-    isNonlinear: (place) => nonlinear[place] === 1,
+    isNonlinear: nonlinearity(set, redshifts, u),
+  };
+}
+
+/** Tells of a place whether u departs from the spread there; a row goes with the nearest of those looked at. */
+function nonlinearity(set: UncertainParameters, redshifts: readonly number[], u: Sweep): (place: number) => boolean {
+  const { rows, nearest } = thinned(redshifts);
+  const probed = spread(
+    set,
+    rows.map((row) => redshifts[row] as number),
+  );
+  const all = redshifts.length;
+  return (place) => {
+    const standIn = placeAmong(place, all, all, (row) => rows[nearest[row] as number] as number);
+    const probe = placeAmong(place, all, rows.length, (row) => nearest[row] as number);
+    return isNonlinear(probed, probe, u[standIn] as number);
   };
 }
 

@@ -24,6 +24,13 @@ export function milestonePlace(rows: number, name: MilestoneName): number {
   return rows * IDS.length + MILESTONE_NAMES.indexOf(name);
 }
 
+/** Where what stands at a place of a sweep stands in one over other rows: `toRow` of the old one, of `rows` in all. */
+export function placeAmong(place: number, oldRows: number, rows: number, toRow: (row: number) => number): number {
+  const row = Math.floor(place / IDS.length);
+  const shift = row < oldRows ? toRow(row) - row : rows - oldRows;
+  return place + shift * IDS.length;
+}
+
 /**
  * All quantities at all redshifts, and all numeric milestones, of one model. NaN stands for what does not exist, words
  * included, and for everything that a model lacks which the kernel cannot evaluate: matter of negative density, or a
