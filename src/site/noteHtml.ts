@@ -11,6 +11,9 @@ export function noteHtml(note: string): string {
       (_, digits: string, power: string) => `${digits === '1' ? '' : `${digits} × `}10<sup>${power}</sup>`,
     )
     .replace(/\^(-?\d+)/g, '<sup>$1</sup>')
+    .replace(/\bw0\b/g, '<var>w</var><sub>0</sub>')
+    .replace(/\bwa\b/g, '<var>w<sub>a</sub></var>')
+    .replace(/\bN_eff\b/g, '<var>N</var><sub>eff</sub>')
     .replace(/\bomega_(\w)/g, 'ω<sub>$1</sub>')
     .replace(/\bz_eq\b/g, '<var>z</var><sub>eq</sub>')
     .replace(/(?<=^|[\s(=>/,])-(?=\d)/g, '−')

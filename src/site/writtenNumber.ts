@@ -6,7 +6,7 @@ const THIN = '\u2009';
  */
 export function writtenNumber(text: string): string {
   const match = /^([-+]?)(\d+)(?:\.(\d+))?(?:[eE]([-+]?\d+))?$/.exec(text);
-  if (!match) return text;
+  if (!match) return text.replace(/^(\d+)\/pi$/, (_, over: string) => `${writtenNumber(over)}/π`);
   const [, sign = '', whole = '', fraction, exponent] = match;
   const digits =
     inThrees(whole, /\B(?=(?:\d{3})+$)/g) + (fraction ? `.${inThrees(fraction, /(?<=^(?:\d{3})+)\B/g)}` : '');

@@ -1,6 +1,6 @@
 import type { ParameterSet, Source } from '../../inputs/types.ts';
 import { pageNumber } from '../../tables/pageCells.ts';
-import type { EditionTables } from '../../tables/types.ts';
+import type { EditionTables, Stamp } from '../../tables/types.ts';
 import { address } from '../addresses.ts';
 import { type ContentsLine, contentsLines } from '../contents.ts';
 import { shownState } from '../currentEdition.ts';
@@ -32,7 +32,8 @@ export interface SetView {
   /** Paragraphs of HTML. */
   readonly note: readonly string[];
   readonly parameters: readonly ParameterLine[];
-  readonly derived: readonly { readonly symbol: string; readonly value: string }[];
+  /** HTML: what follows from the parameters. */
+  readonly derived: string;
   /** HTML. */
   readonly correlations: readonly string[];
   readonly milestones: readonly MilestoneLine[];
@@ -57,10 +58,7 @@ export function setView(press: Press, pressed: EditionTables, id: string): SetVi
     uncertainty: uncertaintySentence(set),
     note: (set.note ?? '').split(/\n+/).filter(Boolean).map(noteHtml),
     parameters: parameterLines(set),
-    derived: derivedOf(pressed, id).map(({ name, value }) => ({
-      symbol: renderFormula(symbolOfName(name), 'inline', 'stamp'),
-      value: pageNumber(Number(value), PAGE_DIGITS),
-    })),
+    derived: derivedOf(pressed, id).map(derivedHtml).join(', '),
     correlations: set.correlations.map(
       ([one, other, r]) => `<i>r</i>(${symbol(one)}, ${symbol(other)}) = ${realMinus(r)}`,
     ),
@@ -74,6 +72,11 @@ export function setView(press: Press, pressed: EditionTables, id: string): SetVi
     tables: contentsLines(pressed, id),
     beside: besideOthers(pressed, set),
   };
+}
+
+function derivedHtml({ name, value }: Stamp['derived'][number]): string {
+  const symbol = renderFormula(symbolOfName(name), 'inline', 'stamp');
+  return `<span class="tied">${symbol} = ${pageNumber(Number(value), PAGE_DIGITS)}</span>`;
 }
 
 function symbol(parameter: keyof typeof PARAMETER_TEXT): string {
