@@ -9,7 +9,7 @@ import { setTitle } from '../setTitle.ts';
 import { TOPIC_TEXT } from '../topicText.ts';
 import { cautions } from './cautions.ts';
 import { type ColumnView, columnViews } from './columnViews.ts';
-import { isWide } from './isWide.ts';
+import { type Fit, fitOf } from './fitOf.ts';
 import { type RowView, rowViews } from './rowViews.ts';
 import { type Thumb, thumbIndex } from './thumbIndex.ts';
 import { type TurnTo, turnTo } from './turnTo.ts';
@@ -24,8 +24,7 @@ export interface TableView {
   readonly grid: { readonly title: string; readonly extent: string };
   readonly columns: readonly ColumnView[];
   readonly groups: readonly (readonly RowView[])[];
-  /** Too wide for the page beside its thumb index. */
-  readonly wide: boolean;
+  readonly fit: Fit;
   readonly thumbs: readonly Thumb[];
   /** HTML. */
   readonly cautions: readonly string[];
@@ -48,7 +47,7 @@ export function tableView(press: Press, pressed: EditionTables, table: Table): T
     grid: { title: table.grid.title, extent: gridExtent(table.grid) },
     columns,
     groups: rowViews(table.redshifts, columns),
-    wide: isWide(columns),
+    fit: fitOf(columns),
     thumbs: thumbIndex(table.redshifts),
     cautions: cautions(table),
     turnTo: turnTo(pressed, table),
