@@ -25,7 +25,7 @@ test('every check of every file is on the page once, with an anchor of its own',
 
 test('those that differ are listed first, each with its reason', () => {
   const differing = lines.filter(({ agrees }) => !agrees);
-  expect(view.differing.map((one) => one.line.id)).toEqual(differing.map(({ id }) => id));
+  expect(view.differing.flatMap((source) => source.lines.map(({ id }) => id))).toEqual(differing.map(({ id }) => id));
   expect(differing.every(({ why }) => why.length > 20)).toBe(true);
 });
 

@@ -30,24 +30,28 @@ export interface PublishedView {
   };
   /** The letters beside the tolerances. */
   readonly grounds: readonly { readonly letter: string; readonly text: string }[];
-  /** Those that differ, wherever they stand. */
-  readonly differing: readonly { readonly source: string; readonly line: CheckLine }[];
+  /** Those that differ, by the title of their source. */
+  readonly differing: readonly { readonly title: string; readonly lines: readonly CheckLine[] }[];
   readonly kinds: readonly { readonly title: string; readonly sources: readonly SourceView[] }[];
 }
 
 /** All published values beside ours. */
 export function publishedView(): PublishedView {
   const sources = publishedSources().map((source) => ({ kind: source.source.kind, view: sourceView(source) }));
-  const lines = sources.flatMap(({ view }) =>
-    view.models.flatMap((model) => model.lines.map((line) => ({ source: view.title, line }))),
-  );
-  const differing = lines.filter(({ line }) => !line.agrees);
+  const bySource = sources.map(({ view }) => ({
+    title: view.title,
+    lines: view.models.flatMap((model) => model.lines),
+  }));
+  const lines = bySource.flatMap((source) => source.lines);
+  const differing = bySource
+    .map((source) => ({ ...source, lines: source.lines.filter(({ agrees }) => !agrees) }))
+    .filter((source) => source.lines.length > 0);
   return {
     counts: {
       values: lines.length,
       sources: sources.length,
-      differing: differing.length,
-      unchecked: lines.filter(({ line }) => line.unchecked).length,
+      differing: lines.filter(({ agrees }) => !agrees).length,
+      unchecked: lines.filter(({ unchecked }) => unchecked).length,
     },
     grounds: Object.values(GROUND_TEXT),
     differing,
