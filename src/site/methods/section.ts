@@ -3,7 +3,10 @@ export interface MethodText {
   /** Anchor on the page. */
   readonly id: string;
   readonly title: string;
-  /** Markdown with formulas; `[text](D_L_Mpc)` leads to a quantity, `[text](#blanks)` to a section, `[text](checked-against)` to that page. ASCII. */
+  /**
+   * Markdown with formulas, ASCII. `[text](D_L_Mpc)` leads to a quantity, `[text](#blanks)` to a section,
+   * `[text](checked-against)` to the page of published values.
+   */
   readonly body: string;
   /** What the program lists below the text. */
   readonly lists?: 'constants';
