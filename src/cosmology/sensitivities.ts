@@ -28,7 +28,8 @@ const NEVER_NEGATIVE: readonly ScalarParameter[] = ['H0', 'Omega_m', 'omega_b', 
  * Method:   parameters are moved as decimals, so that the densities still add up to exactly 1. Central differences over
  *           1/32, 1/64 and 1/128 of the uncertainty, extrapolated; towards positive values only, for a parameter that
  *           is 0 and cannot be negative. Six sweeps for each parameter.
- * Accuracy: 1e-6 of u or better, by the errors returned. A value that ceases to exist within the steps has no
+ * Accuracy: six digits or more, against test/reference/derivatives, wherever one u moves the value by more than 1e-7
+ *           of itself; the errors returned say how many. A value that ceases to exist within the steps has no
  *           derivative.
  */
 export function sensitivities(set: UncertainParameters, redshifts: readonly number[]): readonly Sensitivity[] {
