@@ -50,7 +50,9 @@ export function uncertaintyTable(
       uncertainties.map((row, k) => [grid.redshifts[k] ?? '', ...row.map(uncertaintyCell)]),
     ),
     nonlinear: columns.flatMap((_, column) => nonlinearRanges(sheet, column)),
-    budgets: budgetRows(grid).flatMap((row) => columns.flatMap((_, column) => budget(sheet, row, column))),
+    budgets: budgetRows(grid, uncertainties).flatMap((row) =>
+      columns.flatMap((_, column) => budget(sheet, row, column)),
+    ),
   };
 }
 
@@ -85,9 +87,10 @@ function nonlinearRanges({ found, grid, columns, places, uncertainties }: Sheet,
   return ranges;
 }
 
-/** Rows of a low, a middle and a high redshift; z = 0, where distances are exact, is none of them. */
-function budgetRows({ redshifts }: RedshiftGrid): readonly number[] {
-  const rows = redshifts.map((_, row) => row).filter((row) => Number(redshifts[row]) !== 0);
+/** Rows of a low, a middle and a high redshift with uncertainties; z = 0, where distances are exact, is none of them. */
+function budgetRows({ redshifts }: RedshiftGrid, uncertainties: Values): readonly number[] {
+  const usable = (row: number) => Number(redshifts[row]) !== 0 && uncertainties[row]?.some((u) => u !== null) === true;
+  const rows = redshifts.map((_, row) => row).filter(usable);
   const chosen = [rows[0], rows[Math.floor(rows.length / 2)], rows.at(-1)];
   return [...new Set(chosen)].filter((row) => row !== undefined);
 }

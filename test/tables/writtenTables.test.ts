@@ -11,8 +11,14 @@ import { temporaryFolder } from '../support/temporaryFolder.ts';
 const pressed = {
   edition: { number: '2026.10' },
   tables: [
-    { id: 'a.times.coarse', csv: 'z,a\n0,1\n', redshifts: ['0'], columns: [{}] },
-    { id: 'a.distances.fine', csv: 'z,d,e\n0,1,2\n1,2,3\n', redshifts: ['0', '1'], columns: [{}, {}] },
+    { id: 'a.times.coarse', csv: 'z,a\n0,1\n', uncertaintyCsv: 'z,u_a\n0,0\n', redshifts: ['0'], columns: [{}] },
+    {
+      id: 'a.distances.fine',
+      csv: 'z,d,e\n0,1,2\n1,2,3\n',
+      uncertaintyCsv: null,
+      redshifts: ['0', '1'],
+      columns: [{}, {}],
+    },
   ] as unknown as readonly Table[],
   milestones: [
     { id: 'a.milestones', csv: 'name,value\n', milestones: [{}, {}, {}] },
@@ -23,13 +29,15 @@ const tables = join('editions', '2026.10', 'tables');
 
 test('writeTables writes every CSV of an edition, byte for byte, to editions/NUMBER/tables', () => {
   const folder = temporaryFolder();
-  expect(writeTables(folder, pressed)).toBe(3);
+  expect(writeTables(folder, pressed)).toBe(4);
   expect(readdirSync(join(folder, tables)).sort()).toEqual([
     'a.distances.fine.csv',
     'a.milestones.csv',
     'a.times.coarse.csv',
+    'a.times.coarse.u.csv',
   ]);
   expect(readFileSync(join(folder, tables, 'a.times.coarse.csv'), 'utf8')).toBe('z,a\n0,1\n');
+  expect(readFileSync(join(folder, tables, 'a.times.coarse.u.csv'), 'utf8')).toBe('z,u_a\n0,0\n');
 });
 
 test('countTables counts the z column and the lines of the milestones', () => {
@@ -43,6 +51,7 @@ test('differingTables names changed, missing and surplus files, and no others', 
   writeFileSync(join(folder, tables, 'a.times.coarse.csv'), 'z,a\n0,1.0\n');
   writeFileSync(join(folder, tables, 'b.times.coarse.csv'), '');
   rmSync(join(folder, tables, 'a.milestones.csv'));
-  const names = ['a.milestones', 'a.times.coarse', 'b.times.coarse'];
+  rmSync(join(folder, tables, 'a.times.coarse.u.csv'));
+  const names = ['a.milestones', 'a.times.coarse', 'a.times.coarse.u', 'b.times.coarse'];
   expect([...differingTables(folder, [pressed])].sort()).toEqual(names.map((name) => join(tables, `${name}.csv`)));
 });
