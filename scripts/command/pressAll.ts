@@ -11,7 +11,7 @@ export async function pressAll(content: Content): Promise<Press> {
   for (const edition of content.editions) {
     await setImmediate(); // lets Ctrl-C through
     editions.push(
-      pressEdition(content, edition, (done, all, set) => {
+      await pressEdition(content, edition, (done, all, set) => {
         progress.step(`Edition ${edition.number}: ${done} of ${all} parameter sets computed, ${set.id}`);
       }),
     );

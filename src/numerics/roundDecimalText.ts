@@ -23,7 +23,7 @@ function rounded(value: Decimal, count: number): RoundedDigits {
   const cut = text.length - count;
   const exponent = text.length - 1 + value.exponent;
   if (cut <= 0) return { negative: value.sign() < 0, digits: text.padEnd(count, '0'), exponent };
-  const unit = 10n ** BigInt(cut);
+  const unit = BigInt(`1${'0'.repeat(cut)}`);
   const [kept, twice] = [size / unit, 2n * (size % unit)];
   const up = twice > unit || (twice === unit && kept % 2n === 1n);
   const digits = (up ? kept + 1n : kept).toString();

@@ -29,5 +29,5 @@ async function runPress(folder: string): Promise<Press> {
   const result = readPressable(folder);
   if ('problems' in result) throw new Error(formatProblems(result.problems));
   const { content } = result;
-  return { content, editions: content.editions.map((edition) => pressEdition(content, edition)) };
+  return { content, editions: await Promise.all(content.editions.map((edition) => pressEdition(content, edition))) };
 }

@@ -1,7 +1,8 @@
+import type { QuantityId } from '../cosmology/quantities.ts';
 import type { Topic } from '../inputs/types.ts';
 import type { Column } from './types.ts';
 
-const UNITS: Readonly<Record<Topic, Readonly<Record<string, string>>>> = {
+const UNITS: Readonly<Record<Topic, Readonly<Partial<Record<QuantityId, string>>>>> = {
   distances: {
     D_C_Mpc: 'Mpc',
     D_M_Mpc: 'Mpc',
@@ -52,5 +53,5 @@ export const TOPICS = Object.keys(UNITS) as readonly Topic[];
 
 /** The columns of a topic after `z`, in order of printing. Units are plain text; "" is dimensionless. */
 export function columnsOf(topic: Topic): readonly Column[] {
-  return Object.entries(UNITS[topic]).map(([id, unit]) => ({ id, topic, unit }));
+  return (Object.entries(UNITS[topic]) as [QuantityId, string][]).map(([id, unit]) => ({ id, topic, unit }));
 }

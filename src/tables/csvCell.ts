@@ -1,4 +1,5 @@
-import { type RoundedDigits, roundHalfEven } from '../numerics/roundHalfEven.ts';
+import type { RoundedDigits } from '../numerics/roundHalfEven.ts';
+import { roundValue } from './roundValue.ts';
 
 /** Plain decimals for 1e-4 <= |x| < 1e12, scientific notation outside. */
 const SMALLEST_PLAIN = -4;
@@ -6,10 +7,11 @@ const LARGEST_PLAIN = 11;
 
 /**
  * A value as a CSV cell: rounded half to even to `digits` significant digits, trailing zeros kept, "" where the
- * quantity does not exist, "0" for zero. The rounded value decides between plain and `d.dddE-27` notation.
+ * quantity does not exist, "0" for zero. The rounded value decides between plain and `d.dddE-27` notation. `audited`
+ * is the text to round where the double does not decide.
  */
-export function csvCell(value: number | null, digits: number): string {
-  return value === null ? '' : decimalText(roundHalfEven(value, digits));
+export function csvCell(value: number | null, digits: number, audited?: string): string {
+  return value === null ? '' : decimalText(roundValue(value, audited, digits));
 }
 
 /** Rounded digits as plain ASCII text. */

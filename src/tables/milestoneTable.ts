@@ -1,10 +1,15 @@
 import type { Background } from '../cosmology/background.ts';
+import { milestoneBounds } from '../cosmology/milestoneBounds.ts';
 import { MILESTONE_NAMES, type MilestoneName } from '../cosmology/milestones.ts';
 import { milestoneValues } from '../cosmology/milestoneValues.ts';
+import type { Propagation } from '../cosmology/propagation.ts';
 import type { ParameterSet } from '../inputs/types.ts';
 import { csvCell } from './csvCell.ts';
 import { csvText } from './csvText.ts';
-import type { Milestone } from './types.ts';
+import { milestoneUncertainty } from './milestoneUncertainty.ts';
+import { settleMilestones } from './settleMilestones.ts';
+import type { MilestoneTable } from './types.ts';
+import { uncertaintyCell } from './uncertaintyCell.ts';
 
 /** Units of the milestones; "" for redshifts and words. */
 const UNITS: Readonly<Record<MilestoneName, string>> = {
@@ -30,19 +35,31 @@ const UNITS: Readonly<Record<MilestoneName, string>> = {
   t_crunch: 'Gyr',
 };
 
-/** The milestones of one parameter set and their CSV with columns name, value, u, unit; u is blank where none is given. */
-export function milestoneTable(
+/**
+ * The milestones of one parameter set and their CSV with columns name, value, u, unit; u is blank where none is given.
+ * Values that lie too near a rounding boundary are settled by the audit.
+ */
+export async function milestoneTable(
   set: ParameterSet,
   model: Background,
   digits: number,
-): { id: string; set: ParameterSet; milestones: readonly Milestone[]; csv: string } {
+  found: Propagation | null,
+): Promise<Omit<MilestoneTable, 'checksum'>> {
   const values = milestoneValues(model);
-  const milestones = MILESTONE_NAMES.map((name) => ({ name, value: values[name], unit: UNITS[name] }));
-  const rows = milestones.map(({ name, value, unit }) => [
+  const audited = await settleMilestones(set.parameters, values, milestoneBounds(model, values), digits);
+  const { of: u, nonlinear } = milestoneUncertainty(found);
+  const milestones = MILESTONE_NAMES.map((name) => ({
     name,
-    typeof value === 'string' ? value : csvCell(value, digits),
-    '',
+    value: values[name],
+    u: u(name),
+    unit: UNITS[name],
+    audited: audited(name),
+  }));
+  const rows = milestones.map(({ name, value, u, unit, audited: text }) => [
+    name,
+    typeof value === 'string' ? value : csvCell(value, digits, text),
+    uncertaintyCell(u),
     unit,
   ]);
-  return { id: `${set.id}.milestones`, set, milestones, csv: csvText(['name', 'value', 'u', 'unit'], rows) };
+  return { id: `${set.id}.milestones`, set, milestones, nonlinear, csv: csvText(['name', 'value', 'u', 'unit'], rows) };
 }

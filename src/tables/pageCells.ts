@@ -1,5 +1,6 @@
-import { roundHalfEven } from '../numerics/roundHalfEven.ts';
+import type { RoundedDigits } from '../numerics/roundHalfEven.ts';
 import { plain } from './csvCell.ts';
+import { roundValue } from './roundValue.ts';
 
 const MINUS = '\u2212';
 const THIN_SPACE = '\u2009';
@@ -23,36 +24,43 @@ const SMALLEST_PLAIN = -5;
 /**
  * The values of one column to `digits` significant digits, set for a page: real minus signs, thin spaces between
  * groups of three in long whole numbers, points aligned, one power of ten for the column where that is calmer.
- * Rounded from the values, not from the cells of the CSV.
+ * Rounded from the values, or from the audit's texts by row where there are any; not from the cells of the CSV.
  */
-export function pageColumn(values: readonly (number | null)[], digits: number): PageColumn {
-  const sizes = values.filter((v): v is number => v !== null && v !== 0).map((v) => roundHalfEven(v, digits).exponent);
+export function pageColumn(
+  values: readonly (number | null)[],
+  digits: number,
+  audited: ReadonlyMap<number, string> = new Map(),
+): PageColumn {
+  const rounded = values.map((value, row) => (value === null ? null : roundValue(value, audited.get(row), digits)));
+  const sizes = rounded.filter((r) => r !== null && r.digits !== ZERO).map((r) => r?.exponent ?? 0);
   const largest = sizes.length === 0 ? 0 : Math.max(...sizes);
   const calm = largest <= CALM.largest && largest >= CALM.smallest;
   const exponent = calm ? null : largest;
-  const texts = values.map((value) => (value === null ? '' : cellText(value, digits, exponent ?? 0)));
+  const texts = rounded.map((value) => (value === null ? '' : cellText(value, exponent ?? 0)));
   const decimals = Math.max(0, ...texts.map(decimalPlaces));
   return { exponent, cells: texts.map((text) => pad(text, decimals)) };
 }
 
 /** One value to `digits` significant digits, set for a page; a power of ten where a plain number would be unwieldy. */
-export function pageNumber(value: number, digits: number): string {
-  const rounded = roundHalfEven(value, digits);
+export function pageNumber(value: number, digits: number, audited?: string): string {
+  const rounded = roundValue(value, audited, digits);
   const plainRange = rounded.exponent >= CALM.smallest - 1 && rounded.exponent <= CALM.largest + 1;
-  return plainRange ? cellText(value, digits, 0) : withPower(value, digits, 0);
+  return plainRange ? cellText(rounded, 0) : withPower(rounded, 0);
 }
 
-function cellText(value: number, digits: number, shift: number): string {
-  const rounded = roundHalfEven(value, digits);
+/** Digits of a rounded zero. */
+const ZERO = '0';
+
+function cellText(rounded: RoundedDigits, shift: number): string {
+  const zero = rounded.digits === ZERO;
   const exponent = rounded.exponent - shift;
-  if (value !== 0 && exponent < SMALLEST_PLAIN) return withPower(value, digits, shift);
-  return (rounded.negative ? MINUS : '') + grouped(plain(rounded.digits, value === 0 ? 0 : exponent));
+  if (!zero && exponent < SMALLEST_PLAIN) return withPower(rounded, shift);
+  return (rounded.negative ? MINUS : '') + grouped(plain(rounded.digits, zero ? 0 : exponent));
 }
 
-function withPower(value: number, digits: number, shift: number): string {
-  const { negative, digits: text, exponent } = roundHalfEven(value, digits);
-  const power = exponent - shift;
-  return `${negative ? MINUS : ''}${plain(text, 0)}${THIN_SPACE}×${THIN_SPACE}10${superscript(power)}`;
+function withPower({ negative, digits, exponent }: RoundedDigits, shift: number): string {
+  const power = superscript(exponent - shift);
+  return `${negative ? MINUS : ''}${plain(digits, 0)}${THIN_SPACE}×${THIN_SPACE}10${power}`;
 }
 
 /** Whole parts of five digits and more in groups of three. */

@@ -1,10 +1,12 @@
 import type { MilestoneName } from '../cosmology/milestones.ts';
+import type { QuantityId } from '../cosmology/quantities.ts';
 import type { Edition, ParameterSet, RedshiftGrid, Topic } from '../inputs/types.ts';
+import type { TableUncertainty } from './uncertaintyTypes.ts';
 
 /** One column of a topic. */
 export interface Column {
   /** Column id, e.g. `D_L_Mpc`; also the CSV header. */
-  readonly id: string;
+  readonly id: QuantityId;
   readonly topic: Topic;
   /** Unit for people, plain text, e.g. "km/s/Mpc"; "" if dimensionless. */
   readonly unit: string;
@@ -29,7 +31,7 @@ export interface Stamp {
 }
 
 /** One table: a parameter set x a topic x a redshift grid. */
-export interface Table {
+export interface Table extends TableUncertainty {
   /** `<set>.<topic>.<grid>`, the file name without `.csv`. */
   readonly id: string;
   readonly set: ParameterSet;
@@ -40,6 +42,11 @@ export interface Table {
   readonly redshifts: readonly string[];
   /** `values[row][column]` without the z column; null where the quantity does not exist. */
   readonly values: readonly (readonly (number | null)[])[];
+  /**
+   * Cells whose doubles lie too near a rounding boundary, by column: the audit's decimal text by row. Rounding, in
+   * files and on pages, starts from this text where there is one.
+   */
+  readonly audited: readonly ReadonlyMap<number, string>[];
   /** The CSV, as published. */
   readonly csv: string;
   readonly stamp: Stamp;
@@ -53,6 +60,10 @@ export interface Milestone {
   readonly unit: string;
   /** A number, words (the fate), or null where it does not exist. */
   readonly value: number | string | null;
+  /** Standard uncertainty; null for words, for what does not exist, and for a set that gives none. */
+  readonly u: number | null;
+  /** Decimal text of the audit where the double does not decide the digits. */
+  readonly audited?: string | undefined;
 }
 
 export interface MilestoneTable {
@@ -60,6 +71,8 @@ export interface MilestoneTable {
   readonly id: string;
   readonly set: ParameterSet;
   readonly milestones: readonly Milestone[];
+  /** Milestones whose u is off by more than a tenth of it. */
+  readonly nonlinear: readonly MilestoneName[];
   readonly csv: string;
   readonly checksum: string;
 }

@@ -36,6 +36,7 @@ export function columnViews(content: Content, table: Table): ColumnView[] {
       column,
       table.redshifts,
       table.values.map((row) => row[i] ?? null),
+      table.audited[i],
     ),
   );
 }
@@ -45,9 +46,10 @@ function columnView(
   column: Column,
   redshifts: readonly string[],
   values: readonly (number | null)[],
+  audited: ReadonlyMap<number, string> | undefined,
 ): ColumnView {
   const quantity = quantityText(content, column.id);
-  const { exponent, cells } = pageColumn(values, PAGE_DIGITS);
+  const { exponent, cells } = pageColumn(values, PAGE_DIGITS, audited);
   const power =
     exponent === null || exponent === 0 ? '' : writtenNumber(`1E${exponent}`).replace(/^1\u2009×\u2009/, '');
   return {
