@@ -11,6 +11,7 @@ export default defineConfig({
   site,
   base,
   trailingSlash: 'always',
+  publicDir: './src/public',
   build: { format: 'directory', inlineStylesheets: 'never' },
   compressHTML: true,
   prerenderConflictBehavior: 'error',
