@@ -25,7 +25,7 @@ export async function settleMilestones(
   await startAudit();
   const audited = auditMilestones(parameters, WORKING_DIGITS);
   return (name) => {
-    const found = name !== 'fate' && open.includes(name) ? audited[name] : null;
-    return found === null ? undefined : decidingText(found);
+    const found = open.includes(name) ? audited[name] : null;
+    return found === null || typeof found === 'string' ? undefined : decidingText(found);
   };
 }

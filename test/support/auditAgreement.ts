@@ -24,9 +24,9 @@ export function readReference(file: string): Reference {
 }
 
 /** A sentence when an audited value differs from the reference by more than their errors together. */
-function difference(place: string, audited: Audited | null, expected: string | null): readonly string[] {
-  if (audited === null || expected === null) {
-    return audited === null && expected === null ? [] : [`${place} is ${audited?.text ?? null}, expected ${expected}`];
+function difference(place: string, audited: Audited | string | null, expected: string | null): readonly string[] {
+  if (audited === null || expected === null || typeof audited === 'string') {
+    return audited === expected ? [] : [`${place} is ${JSON.stringify(audited)}, expected ${expected}`];
   }
   const apart = Math.abs(Decimal.parse(audited.text).minus(Decimal.parse(expected)).toNumber());
   const allowed = Number(audited.error) + REFERENCE_ERROR * Math.abs(Number(expected));

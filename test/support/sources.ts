@@ -55,7 +55,7 @@ function asImport(node: ts.Node): Import | undefined {
 /** `import type ...`, or braces in which every name is marked `type`. */
 function isTypeOnly(clause: ts.ImportClause | undefined): boolean {
   if (!clause) return false;
-  if (clause.isTypeOnly) return true;
+  if (clause.phaseModifier === ts.SyntaxKind.TypeKeyword) return true;
   const names = clause.namedBindings;
   return !clause.name && names !== undefined && ts.isNamedImports(names) && names.elements.every((e) => e.isTypeOnly);
 }

@@ -3,60 +3,95 @@ import { root } from '../../numerics/extended/root.ts';
 import { expansionSquared } from './contents.ts';
 import { signedTransverse, transverseSlope } from './geometry.ts';
 import type { Model } from './model.ts';
-import { span } from './spans.ts';
+import { sinceBigBang, span } from './spans.ts';
 import type { Turns } from './turns.ts';
 
-/** A place on the way back in time. */
+/** ln(1+z) to which the past is followed, in steps. */
+const FARTHEST = 60;
+const STEP = 1 / 16;
+
+/** An epoch of the past and the comoving distance to it in c/H0. */
 interface Place {
   /** 1 + z. */
   readonly u: Real;
-  /** Comoving distance from today, c/H0. */
   readonly comoving: Real;
 }
 
-/** Steps in ln(1+z), and how far they go: no crossing lies beyond e^60 in any universe with a past like ours. */
-const STEP = 1 / 8;
-const FARTHEST = 60;
-/** A fall below zero by less is rounding: some functions only approach zero. */
-const ROUNDING = 1e-25;
-
-/**
- * The first place going back in time where f, of order 1, falls through zero; null where it never does. Each step
- * integrates from the last place where f was positive.
- */
-function firstFall(model: Model, { bounce }: Turns, f: (place: Place) => Real): Place | null {
+/** Places from today outwards, up to the bounce if there is one. */
+function* outwards(model: Model, turns: Turns): Generator<Place> {
   const { arithmetic } = model;
-  const noTurns = { bounce, maximum: null };
-  const end = bounce === null ? FARTHEST : Math.min(FARTHEST, Math.log(bounce.toNumber()));
-  let last: Place = { u: arithmetic.real(1), comoving: arithmetic.real(0) };
-  for (let step = 1; step * STEP < end; step++) {
-    const from = last;
-    const place = (u: Real): Place => ({ u, comoving: from.comoving.plus(span(model, noTurns, from.u, u).comoving) });
-    const next = place(arithmetic.real(step * STEP).exp());
-    const value = f(next);
-    if (value.below(-ROUNDING)) return place(root(arithmetic, (u) => f(place(u)), from.u, next.u));
-    if (value.sign() > 0) last = next;
+  const end = turns.bounce === null ? FARTHEST : Math.log(turns.bounce.toNumber());
+  let here: Place = { u: arithmetic.real(1), comoving: arithmetic.real(0) };
+  yield here;
+  for (let x = STEP; x < end; x += STEP) {
+    const u = arithmetic.real(x).exp();
+    here = { u, comoving: distance(model, turns, here, u) };
+    yield here;
+  }
+}
+
+/** Comoving distance to 1 + z = u from that to a nearer place. */
+function distance(model: Model, turns: Turns, from: Place, u: Real): Real {
+  return from.comoving.plus(span(model, turns, from.u, u).comoving);
+}
+
+/** All comoving distance there is, to the Big Bang; null where it has no limit or there was none. */
+function wholeDistance(model: Model, turns: Turns): Real | null {
+  return sinceBigBang(model, turns, model.arithmetic.real(1)).comoving;
+}
+
+/** 1 + z at which a comoving source recedes at the speed of light today: D_C = c/H0. Null where none does. */
+export function recessionAtLightSpeed(model: Model, turns: Turns): Real | null {
+  if (wholeDistance(model, turns)?.below(1)) return null;
+  let before: Place | null = null;
+  for (const place of outwards(model, turns)) {
+    const from: Place | null = before;
+    if (from !== null && !place.comoving.below(1))
+      return root(model.arithmetic, (u) => distance(model, turns, from, u).minus(1), from.u, place.u);
+    before = place;
   }
   return null;
 }
 
-/** Where a comoving source recedes at the speed of light today: D_C = c/H0. */
-export function recessionAtLightSpeed(model: Model, turns: Turns): Place | null {
-  return firstFall(model, turns, ({ comoving }) => comoving.negated().plus(1));
+/** The change of D_A = |S(chi)|/u with u, times u^2: u |S|'/E - |S|. Zero when it is lost in the rounding of its terms. */
+function slope(model: Model, { u, comoving }: Place): Real {
+  const { arithmetic } = model;
+  const transverse = signedTransverse(model, comoving);
+  const rise = u.times(transverseSlope(model, comoving)).over(expansionSquared(model, u).sqrt());
+  const change = rise.minus(transverse).times(transverse.sign() < 0 ? -1 : 1);
+  const noise = transverse.magnitude().times(arithmetic.powerOfTen(-arithmetic.digits));
+  return change.magnitude().below(noise) ? arithmetic.real(0) : change;
 }
 
-/**
- * Where D_A is largest, counted from today: there dD_M/dz (1+z) = D_M, which is D_M' u/E = D_M with D_M' its derivative
- * by the line-of-sight distance.
- */
-export function largestAngularDistance(
-  model: Model,
-  turns: Turns,
-): { readonly u: Real; readonly distance: Real } | null {
-  const place = firstFall(model, turns, ({ u, comoving }) => {
-    const slope = transverseSlope(model, comoving);
-    const ratio = signedTransverse(model, comoving).times(expansionSquared(model, u).sqrt()).over(u);
-    return slope.minus(ratio).over(slope.magnitude().plus(ratio.magnitude()));
-  });
-  return place && { u: place.u, distance: signedTransverse(model, place.comoving).over(place.u) };
+/** The place of the highest maximum of the angular diameter distance in the past, and its value in c/H0. */
+export function largestAngularDistance(model: Model, turns: Turns): { u: Real; distance: Real } | null {
+  const limit = transverseLimit(model, turns);
+  let best: { u: Real; distance: Real } | null = null;
+  let before: Place | null = null;
+  let sign = 0;
+  for (const place of outwards(model, turns)) {
+    // No transverse distance is larger than the limit, so that no D_A from here on is larger than limit/u.
+    if (best !== null && limit?.over(place.u).below(best.distance)) break;
+    const next = slope(model, place).sign();
+    if (before !== null && sign > 0 && next < 0) {
+      const found = maximum(model, turns, before, place);
+      if (best === null || best.distance.below(found.distance)) best = found;
+    }
+    if (next !== 0) sign = next;
+    before = place;
+  }
+  return best;
+}
+
+function maximum(model: Model, turns: Turns, from: Place, to: Place): { u: Real; distance: Real } {
+  const placeAt = (u: Real): Place => ({ u, comoving: distance(model, turns, from, u) });
+  const u = root(model.arithmetic, (x) => slope(model, placeAt(x)), from.u, to.u);
+  return { u, distance: signedTransverse(model, placeAt(u).comoving).magnitude().over(u) };
+}
+
+/** The largest transverse distance of the past; null where it has no limit. */
+function transverseLimit(model: Model, turns: Turns): Real | null {
+  if (model.curvature.sign() < 0) return model.curvature.magnitude().sqrt().reciprocal();
+  const whole = wholeDistance(model, turns);
+  return whole === null ? null : signedTransverse(model, whole);
 }
