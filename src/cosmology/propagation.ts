@@ -1,3 +1,4 @@
+import { type CorrelationMatrix, combinedUncertainty, correlatedWith } from './combinedUncertainty.ts';
 import { isNonlinear, spread } from './nonlinearity.ts';
 import type { ScalarParameter } from './parameters.ts';
 import { type Sensitivity, sensitivities } from './sensitivities.ts';
@@ -25,9 +26,6 @@ export interface Propagation {
   isNonlinear(place: number): boolean;
 }
 
-/** Contributions that cancel to less than this of the largest are rounding of the derivatives. */
-const CANCELLED = 1e-9;
-
 /**
  * Standard uncertainties by the law of propagation, u(y)^2 = sum over i, j of c_i u_i r_ij c_j u_j with the
  * sensitivities c_i = dy/dx_i: u(y) = sqrt(J V J^T). Null for a set that gives no uncertainties. Redshifts ascend.
@@ -41,7 +39,7 @@ export function propagation(set: UncertainParameters, redshifts: readonly number
   const names = found.map(({ parameter }) => parameter);
   const r = correlationMatrix(set, names);
   const terms = found.map((sensitivity) => contribution(set, sensitivity));
-  const u = first.derivatives.map((_, place) => combined(termsAt(terms, place), r));
+  const u = first.derivatives.map((_, place) => combinedUncertainty(termsAt(terms, place), r));
   return {
     redshifts,
     u,
@@ -75,28 +73,12 @@ function termsAt(terms: readonly Sweep[], place: number): readonly number[] {
   return terms.map((term) => term[place] as number);
 }
 
-type Matrix = readonly (readonly number[])[];
-
-/** sqrt(t R t^T). */
-function combined(terms: readonly number[], r: Matrix): number {
-  let square = 0;
-  let largest = 0;
-  for (const [i, term] of terms.entries()) {
-    square += term * term + term * correlatedWith(terms, r, i);
-    largest = Math.max(largest, Math.abs(term)); // NaN stays NaN
-  }
-  const limit = CANCELLED * largest;
-  return square <= limit * limit ? 0 : Math.sqrt(square);
-}
-
-/** The sum of r_ij t_j over the others. */
-function correlatedWith(terms: readonly number[], r: Matrix, i: number): number {
-  let sum = 0;
-  for (const [j, other] of terms.entries()) if (j !== i) sum += (r[i]?.[j] as number) * other;
-  return sum;
-}
-
-function shares(names: readonly ScalarParameter[], terms: readonly number[], r: Matrix, u: number): readonly Share[] {
+function shares(
+  names: readonly ScalarParameter[],
+  terms: readonly number[],
+  r: CorrelationMatrix,
+  u: number,
+): readonly Share[] {
   if (!(u > 0)) return [];
   return names.map((parameter, i) => {
     const term = terms[i] as number;

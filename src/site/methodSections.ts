@@ -1,4 +1,5 @@
 import { CONSTANTS } from '../cosmology/constants.ts';
+import type { ParameterSet } from '../inputs/types.ts';
 import { address } from './addresses.ts';
 import { renderFormula } from './formula.ts';
 import { renderMarkdown } from './markdown.ts';
@@ -6,6 +7,7 @@ import { MODEL_TEXT } from './methods/modelText.ts';
 import { NUMBERS_TEXT } from './methods/numbersText.ts';
 import { READING_TEXT } from './methods/readingText.ts';
 import type { MethodText } from './methods/section.ts';
+import { uncertaintyText } from './methods/uncertaintyText.ts';
 import { quantityLink } from './quantityLink.ts';
 import { unitHtml } from './unitText.ts';
 import { writtenNumber } from './writtenNumber.ts';
@@ -28,9 +30,9 @@ export interface ConstantLine {
   readonly source: string;
 }
 
-/** The sections of the methods page, in order. */
-export function methodSections(): readonly MethodSection[] {
-  return [...MODEL_TEXT, ...NUMBERS_TEXT, ...READING_TEXT].map(section);
+/** The sections of the methods page, in order. The uncertainties of `sets` stand beside published ones. */
+export function methodSections(sets: readonly ParameterSet[]): readonly MethodSection[] {
+  return [...MODEL_TEXT, ...NUMBERS_TEXT, ...uncertaintyText(sets), ...READING_TEXT].map(section);
 }
 
 function section({ id, title, body, lists }: MethodText): MethodSection {

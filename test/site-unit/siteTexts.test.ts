@@ -5,6 +5,7 @@ import { renderFormula } from '../../src/site/formula.ts';
 import { methodSections } from '../../src/site/methodSections.ts';
 import { MILESTONE_TEXT } from '../../src/site/milestoneText.ts';
 import { quantityLink } from '../../src/site/quantityLink.ts';
+import { shippedSets } from '../support/shippedSet.ts';
 
 describe('the milestones', () => {
   test.each(MILESTONE_NAMES)('%s has words, and formulas that can be printed', (name) => {
@@ -22,7 +23,7 @@ describe('the milestones', () => {
 });
 
 describe('the sections of the methods page', () => {
-  const sections = methodSections();
+  const sections = methodSections(shippedSets());
   const ids = sections.map(({ id }) => id);
 
   test('have anchors of their own, which their links find', () => {

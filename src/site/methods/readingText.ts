@@ -58,6 +58,8 @@ are lower by one.
 - Fixsen, D. J. (2009), *The temperature of the cosmic microwave background*, ApJ 707, 916,
   [arXiv:0911.1955](https://arxiv.org/abs/0911.1955)
 - Hogg, D. W. (1999), *Distance measures in cosmology*, [astro-ph/9905116](https://arxiv.org/abs/astro-ph/9905116)
+- JCGM (2008), *Evaluation of measurement data: guide to the expression of uncertainty in measurement*, JCGM 100,
+  [doi:10.59161/JCGM100-2008E](https://doi.org/10.59161/JCGM100-2008E)
 - Komatsu, E. et al. (2011), *Seven-year WMAP observations: cosmological interpretation*, ApJS 192, 18,
   [arXiv:1001.4538](https://arxiv.org/abs/1001.4538)
 - Lesgourgues, J. & Pastor, S. (2006), *Massive neutrinos and cosmology*, Phys. Rep. 429, 307,
