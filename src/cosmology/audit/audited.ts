@@ -11,6 +11,8 @@ export interface Audited {
 
 /** How many digits more the second evaluation has. */
 const MORE_DIGITS = 16;
+/** A value that shrinks by this power of ten with sixteen digits more is nothing but rounding: an exact zero. */
+const VANISHING_DIGITS = 12;
 /** Two digits of the working digits are not counted on: both evaluations could err alike in those. */
 const UNCOUNTED_DIGITS = 2;
 
@@ -25,7 +27,8 @@ function arithmeticOf(digits: number): Arithmetic {
 
 /**
  * Values in order, evaluated twice: with the working digits, and with sixteen digits more. The second evaluation uses
- * other nodes for every integral, so that the difference shows errors of integration as well as of rounding.
+ * other nodes for every integral, so that the difference shows errors of integration as well as of rounding. A value
+ * that vanishes with more digits is a sum of terms that cancel exactly, and becomes an exact 0.
  *
  * Errors: Error when a value exists in one of the two evaluations only.
  */
@@ -39,15 +42,16 @@ export function twice(
   return values.map((text, k) => {
     const other = finer[k] ?? null;
     if ((text === null) !== (other === null)) throw new Error('a value exists with one working precision only');
-    return text === null || other === null ? null : { text, error: errorOf(text, other, digits) };
+    return text === null || other === null ? null : compared(text, other, digits);
   });
 }
 
-function errorOf(text: string, finer: string, digits: number): string {
-  const value = Decimal.parse(text);
-  const change = value.minus(Decimal.parse(finer));
+function compared(text: string, finer: string, digits: number): Audited {
+  const [value, other] = [Decimal.parse(text), Decimal.parse(finer)];
+  const vanishing = magnitude(value).times(Decimal.parse(`1e-${VANISHING_DIGITS}`));
+  if (magnitude(other).compare(vanishing) <= 0) return { text: '0', error: '0' };
   const floor = value.times(Decimal.parse(`1e${UNCOUNTED_DIGITS - digits}`));
-  return magnitude(change).plus(magnitude(floor)).toString();
+  return { text, error: magnitude(value.minus(other)).plus(magnitude(floor)).toString() };
 }
 
 function magnitude(value: Decimal): Decimal {
