@@ -33,7 +33,10 @@ export function renderMarkdown(text: string, { where, link }: MarkdownOptions): 
       },
       link({ href, tokens }) {
         const target = /^(https:\/\/|#)/.test(href) ? href : link(href);
-        return `<a href="${escaped(target ?? refuse(`a link leads nowhere: ${href}`))}">${this.parser.parseInline(tokens)}</a>`;
+        const text = this.parser.parseInline(tokens);
+        // A formula alone is no name for a link: programs that read pages aloud may skip it.
+        const name = /^<math\b(?!.*<\/math>.)/s.test(text) ? '<span class="unseen">Quantity </span>' : '';
+        return `<a href="${escaped(target ?? refuse(`a link leads nowhere: ${href}`))}">${name}${text}</a>`;
       },
     },
   });
