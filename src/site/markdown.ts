@@ -40,7 +40,14 @@ export function renderMarkdown(text: string, { where, link }: MarkdownOptions): 
       },
     },
   });
-  return marked.parse(text, { async: false });
+  return framed(marked.parse(text, { async: false }));
+}
+
+/** Tables in a frame that scrolls where they are too wide, and can therefore be reached by keyboard. */
+function framed(html: string): string {
+  return html
+    .replaceAll('<table>', '<div class="sheet" role="group" aria-label="Table" tabindex="0"><table>')
+    .replaceAll('</table>', '</table></div>');
 }
 
 /** Text for HTML; the tokens of the parser hold it as written. */

@@ -16,7 +16,10 @@ export interface PageColumn {
   readonly cells: readonly string[];
 }
 
-/** A column is printed with a common power of ten when its largest value lies outside these powers. */
+/**
+ * A column is printed with a common power of ten when its largest value lies outside these powers, and no cell would then
+ * need a second power of its own.
+ */
 const CALM = { smallest: -3, largest: 6 } as const;
 /** Cells below this power of ten get a power of their own, so that no row of zeros hides them. */
 const SMALLEST_PLAIN = -5;
@@ -35,7 +38,8 @@ export function pageColumn(
   const sizes = rounded.filter((r) => r !== null && r.digits !== ZERO).map((r) => r?.exponent ?? 0);
   const largest = sizes.length === 0 ? 0 : Math.max(...sizes);
   const calm = largest <= CALM.largest && largest >= CALM.smallest;
-  const exponent = calm ? null : largest;
+  const sharing = Math.min(...sizes) - largest >= SMALLEST_PLAIN;
+  const exponent = calm || !sharing ? null : largest;
   const texts = rounded.map((value) => (value === null ? '' : cellText(value, exponent ?? 0)));
   const decimals = Math.max(0, ...texts.map(decimalPlaces));
   return { exponent, cells: texts.map((text) => pad(text, decimals)) };
@@ -44,7 +48,7 @@ export function pageColumn(
 /** One value to `digits` significant digits, set for a page; a power of ten where a plain number would be unwieldy. */
 export function pageNumber(value: number, digits: number, audited?: string): string {
   const rounded = roundValue(value, audited, digits);
-  const plainRange = rounded.exponent >= CALM.smallest - 1 && rounded.exponent <= CALM.largest + 1;
+  const plainRange = rounded.exponent >= CALM.smallest - 1 && rounded.exponent <= CALM.largest;
   return plainRange ? cellText(rounded, 0) : withPower(rounded, 0);
 }
 
@@ -54,7 +58,7 @@ const ZERO = '0';
 function cellText(rounded: RoundedDigits, shift: number): string {
   const zero = rounded.digits === ZERO;
   const exponent = rounded.exponent - shift;
-  if (!zero && exponent < SMALLEST_PLAIN) return withPower(rounded, shift);
+  if (!zero && (exponent < SMALLEST_PLAIN || exponent > CALM.largest)) return withPower(rounded, shift);
   return (rounded.negative ? MINUS : '') + grouped(plain(rounded.digits, zero ? 0 : exponent));
 }
 

@@ -34,6 +34,5 @@ export function partsOf(table: HTMLTableElement): Parts {
 }
 
 function nameOf(head: HTMLElement): string {
-  const named = head.querySelector('[aria-label]');
-  return named?.getAttribute('aria-label') ?? head.textContent.trim();
+  return head.querySelector<HTMLElement>('[title]')?.title ?? head.textContent.trim();
 }
