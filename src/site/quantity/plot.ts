@@ -32,7 +32,7 @@ export interface Plot {
 export const SPAN = 2000;
 const POINTS = 120;
 /** Letters of a label. */
-const LABEL = 30;
+const LABEL = 26;
 
 /** Undefined where no grid suits a drawing, or the column exists in no set. */
 export function plot(pressed: EditionTables, { id, topic }: Column): Plot | undefined {
