@@ -23,10 +23,7 @@ await runCommand(async () => {
   const { content, out } = folders;
   const press = await renew(content, out);
   const site = await devSite(press, projectRoot, FIRST_PORT);
-  console.log(`
-${press.content.site.title}: ${site.address}
-The pages follow the files in ${shortPath(content)}. Ctrl-C stops.`);
-  site.watch(content, async () => {
+  await site.watch(content, async () => {
     try {
       const next = await renew(content, out);
       site.show(next);
@@ -37,6 +34,9 @@ The pages follow the files in ${shortPath(content)}. Ctrl-C stops.`);
       site.complain((error as Error).message);
     }
   });
+  console.log(`
+${press.content.site.title}: ${site.address}
+The pages follow the files in ${shortPath(content)}. Ctrl-C stops.`);
   await untilStopped();
   await site.close();
 });

@@ -1,4 +1,6 @@
-import { resolve, sep } from 'node:path';
+import { readdirSync } from 'node:fs';
+import { join, resolve, sep } from 'node:path';
+import { setTimeout as sleep } from 'node:timers/promises';
 import type { AstroIntegration } from 'astro';
 import type { ViteDevServer } from 'vite';
 import { leavePress } from './leavePress.ts';
@@ -7,8 +9,11 @@ import type { Press } from './press.ts';
 /** The pages under Astro's development server. */
 export interface DevSite {
   readonly address: string;
-  /** Calls `changed` after changes of files below `folder`: one call at a time, the last change always included. */
-  watch(folder: string, changed: () => Promise<void>): void;
+  /**
+   * Calls `changed` after changes of files below `folder`: one call at a time, the last change always included.
+   * Resolves when all of it is watched.
+   */
+  watch(folder: string, changed: () => Promise<void>): Promise<void>;
   /** Shows another press; open pages reload. */
   show(press: Press): void;
   /** Lays a message over the open pages, until the next `show`. */
@@ -50,11 +55,17 @@ export async function devSite(press: Press, root: string, port: number): Promise
 
 /** Editors write a file in several steps; wait until they are done, ms. */
 const QUIET_TIME = 150;
+/** How often, and how many times, one looks whether all folders are watched. */
+const LOOK_EVERY = 50;
+const LOOKS = 100;
 
-function watchFolder(watcher: ViteDevServer['watcher'], folder: string, changed: () => Promise<void>): void {
+async function watchFolder(
+  watcher: ViteDevServer['watcher'],
+  folder: string,
+  changed: () => Promise<void>,
+): Promise<void> {
   let timer: NodeJS.Timeout | undefined;
   let running: Promise<void> = Promise.resolve();
-  watcher.add(folder);
   watcher.on('all', (_, path) => {
     if (!path.startsWith(`${folder}${sep}`)) return;
     clearTimeout(timer);
@@ -62,6 +73,15 @@ function watchFolder(watcher: ViteDevServer['watcher'], folder: string, changed:
       running = running.then(changed);
     }, QUIET_TIME);
   });
+  watcher.add(folder);
+  // The watcher does not say when a folder added to it is scanned, and misses changes until then.
+  for (let look = 0; look < LOOKS && !isWatched(watcher, folder); look += 1) await sleep(LOOK_EVERY);
+}
+
+function isWatched(watcher: ViteDevServer['watcher'], folder: string): boolean {
+  const below = readdirSync(folder, { recursive: true, withFileTypes: true }).filter((entry) => entry.isDirectory());
+  const watched = watcher.getWatched();
+  return [folder, ...below.map(({ parentPath, name }) => join(parentPath, name))].every((path) => path in watched);
 }
 
 /** Modules that keep what they made of the old press are loaded anew. */
