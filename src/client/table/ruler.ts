@@ -3,6 +3,8 @@ import type { Parts, Row } from './parts.ts';
 /** The one row whose redshift the Tab key reaches. */
 export interface Ruler {
   readonly moveTo: (row: Row) => void;
+  /** Moves there, and the focus too. */
+  readonly focus: (row: Row) => void;
 }
 
 /**
@@ -43,7 +45,12 @@ export function startRuler({ table, rows }: Parts): Ruler {
     makeStop(next);
     next.focus();
   });
-  return { moveTo: ({ element }) => makeStop(element.cells[0]) };
+  const moveTo = ({ element }: Row): void => makeStop(element.cells[0]);
+  const focus = (row: Row): void => {
+    moveTo(row);
+    stop?.focus({ preventScroll: true });
+  };
+  return { moveTo, focus };
 }
 
 function nextShown(heads: readonly HTMLElement[], at: number, step: number): HTMLElement | undefined {

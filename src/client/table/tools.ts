@@ -77,7 +77,7 @@ export function startTableTools(tools: HTMLElement, table: HTMLTableElement): vo
     if (location.hash === hash) arrive();
     else location.hash = hash;
     // The arrows go on from the row; one that is not on the grid leaves the field in hand, to be mended.
-    if (exact) rows[0]?.element.cells[0]?.focus({ preventScroll: true });
+    if (exact && rows[0]) ruler.focus(rows[0]);
   });
   part('.range').addEventListener('submit', (event) => {
     event.preventDefault();
