@@ -8,6 +8,9 @@ import { columnsOf } from './columns.ts';
 import { csvCell } from './csvCell.ts';
 import { csvText } from './csvText.ts';
 import { type EvaluatedGrid, evaluateRows } from './evaluateRows.ts';
+import { interpolationErrors } from './interpolationErrors.ts';
+import { interpolationTable } from './interpolationTable.ts';
+import type { ColumnInterpolation } from './interpolationTypes.ts';
 import { milestoneTable } from './milestoneTable.ts';
 import { type Settled, settle } from './settle.ts';
 import { stamp } from './stamp.ts';
@@ -35,6 +38,7 @@ interface Sheet extends EvaluatedGrid {
   readonly grid: RedshiftGrid;
   readonly settled: Settled;
   readonly uncertain: Propagation | null;
+  readonly between: readonly ColumnInterpolation[];
 }
 
 /** The audit's texts of one column, by row. */
@@ -72,6 +76,7 @@ function pressTable(sheet: Sheet, topic: Topic): Table {
     stamp: stamp(edition, set, model, sha256(csv)),
     beyondAntipode: beyondAntipode(model, sheet.epochs),
     ...uncertaintyTable(sheet.uncertain, grid, columns, values),
+    ...interpolationTable(sheet.between, columns),
   };
 }
 
@@ -83,7 +88,13 @@ async function pressSet(
   uncertain: Propagation | null,
 ): Promise<readonly Table[]> {
   const model = background(set.parameters);
-  const evaluated = grids.map((grid) => ({ grid, ...evaluateRows(model, grid.redshifts.map(Number)) }));
+  const columns = edition.topics.flatMap((topic) => columnsOf(topic).map(({ id }) => id));
+  const evaluated = grids.map((grid) => {
+    const redshifts = grid.redshifts.map(Number);
+    const sheet = evaluateRows(model, redshifts);
+    const between = interpolationErrors({ model, redshifts, epochs: sheet.epochs, columns, digits: edition.digits });
+    return { grid, ...sheet, between };
+  });
   const settled = await settle(
     set.parameters,
     evaluated.map(({ grid, rows }) => ({ redshifts: grid.redshifts, rows })),

@@ -1,6 +1,7 @@
 import type { MilestoneName } from '../cosmology/milestones.ts';
 import type { QuantityId } from '../cosmology/quantities.ts';
 import type { Edition, ParameterSet, RedshiftGrid, Topic } from '../inputs/types.ts';
+import type { TableInterpolation } from './interpolationTypes.ts';
 import type { TableUncertainty } from './uncertaintyTypes.ts';
 
 /** One column of a topic. */
@@ -31,7 +32,7 @@ export interface Stamp {
 }
 
 /** One table: a parameter set x a topic x a redshift grid. */
-export interface Table extends TableUncertainty {
+export interface Table extends TableUncertainty, TableInterpolation {
   /** `<set>.<topic>.<grid>`, the file name without `.csv`. */
   readonly id: string;
   readonly set: ParameterSet;

@@ -27,7 +27,7 @@ describe('npm run tables', () => {
     expect(code).toBe(0);
     const [number = ''] = readdirSync(join(content, 'editions'));
     const files = readdirSync(join(out, 'editions', number, 'tables'));
-    expect(files).toHaveLength(5);
+    expect(files).toHaveLength(9);
     expect(files.every((file) => file.endsWith('.csv'))).toBe(true);
     expect(stdout).toMatch(/1 of 1 parameter sets computed/);
     expect(stdout).toMatch(
@@ -51,7 +51,7 @@ describe('npm run tables', () => {
     editFile(join(content, 'parameter-sets', `${set}.yaml`), (text) => text.replace(/(H0:[^\d]*)\d/, '$18'));
     const { code, stderr } = run('tables');
     expect(code).toBe(1);
-    expect(stderr).toContain(`${out} holds a site whose pages show other values: 5 CSV files differ`);
+    expect(stderr).toContain(`${out} holds a site whose pages show other values: 9 CSV files differ`);
     expect(treeHashes(out)).toEqual(built);
   });
 });

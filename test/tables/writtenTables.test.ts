@@ -11,11 +11,19 @@ import { temporaryFolder } from '../support/temporaryFolder.ts';
 const pressed = {
   edition: { number: '2026.10' },
   tables: [
-    { id: 'a.times.coarse', csv: 'z,a\n0,1\n', uncertaintyCsv: 'z,u_a\n0,0\n', redshifts: ['0'], columns: [{}] },
+    {
+      id: 'a.times.coarse',
+      csv: 'z,a\n0,1\n',
+      uncertaintyCsv: 'z,u_a\n0,0\n',
+      interpolationCsv: 'column\na\n',
+      redshifts: ['0'],
+      columns: [{}],
+    },
     {
       id: 'a.distances.fine',
       csv: 'z,d,e\n0,1,2\n1,2,3\n',
       uncertaintyCsv: null,
+      interpolationCsv: 'column\nd\ne\n',
       redshifts: ['0', '1'],
       columns: [{}, {}],
     },
@@ -29,15 +37,18 @@ const tables = join('editions', '2026.10', 'tables');
 
 test('writeTables writes every CSV of an edition, byte for byte, to editions/NUMBER/tables', () => {
   const folder = temporaryFolder();
-  expect(writeTables(folder, pressed)).toBe(4);
+  expect(writeTables(folder, pressed)).toBe(6);
   expect(readdirSync(join(folder, tables)).sort()).toEqual([
     'a.distances.fine.csv',
+    'a.distances.fine.interpolation.csv',
     'a.milestones.csv',
     'a.times.coarse.csv',
+    'a.times.coarse.interpolation.csv',
     'a.times.coarse.u.csv',
   ]);
   expect(readFileSync(join(folder, tables, 'a.times.coarse.csv'), 'utf8')).toBe('z,a\n0,1\n');
   expect(readFileSync(join(folder, tables, 'a.times.coarse.u.csv'), 'utf8')).toBe('z,u_a\n0,0\n');
+  expect(readFileSync(join(folder, tables, 'a.times.coarse.interpolation.csv'), 'utf8')).toBe('column\na\n');
 });
 
 test('countTables counts the z column and the lines of the milestones', () => {
