@@ -56,7 +56,15 @@ export const MILESTONE_SEARCH_NAMES: Readonly<Record<MilestoneName, readonly str
     'radius of the observable universe',
   ],
   event_horizon_today: ['event horizon', 'reachable universe'],
-  fate: ['end of the universe', 'future', 'fate of the universe', 'recollapse', 'expands forever', 'big crunch'],
+  fate: [
+    'end of the universe',
+    'future',
+    'fate of the universe',
+    'recollapse',
+    'expands forever',
+    'big crunch',
+    'big rip',
+  ],
   t_maximum: ['maximum expansion', 'time of maximum', 'turnaround', 'recollapse'],
   t_crunch: ['crunch', 'big crunch', 'time of the crunch', 'recollapse'],
 };

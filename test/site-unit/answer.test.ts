@@ -53,7 +53,7 @@ test('a redshift between two rows leads to both and says so', () => {
 
 test.each([
   ['z=20000', '20000 lies beyond every row of “Logarithmic grid”, which ends at 10000.'],
-  ['z=-0.5', '-0.5 lies below every row of “Reading grid”, which begins at 0.0.'],
+  ['z=-0.5', '−0.5 lies below every row of “Reading grid”, which begins at 0.0.'],
 ])('%j is told that it is off the grids', (text, note) => {
   expect(ask(text).notes).toEqual([note]);
 });
@@ -80,7 +80,10 @@ test.each([
   ['13.77 Gyr', 'Age today', '13.772 Gyr'],
   ['w0 -1', 'Dark energy equation of state today', '-1'],
 ])('%j finds the value of %s first: %s', (text, title, value) => {
-  expect(ask(text).hits[0]).toMatchObject({ title, value });
+  const [hit] = ask(text).hits;
+  const { written, u, unit } = hit?.value ?? { written: '', unit: '' };
+  expect(hit?.title).toBe(title);
+  expect([written, ...(u === undefined ? [] : ['±', u]), unit].join(' ').trim()).toBe(value);
 });
 
 test('a milestone leads to its line on the page of the set', () => {
@@ -109,6 +112,22 @@ test('"a" is the scale factor by itself and before a redshift, an article elsewh
   expect(addresses('a')[0]).toBe('/quantities/a/');
   expect(addresses('a at 1')[0]).toBe('/editions/2026.1/tables/planck-2018.times.survey/#z=1.00');
   expect(ask('a luminosity distance').reading).toBe('Luminosity distance');
+});
+
+test('a symbol typed to the letter is not another one with the same letters', () => {
+  const rows = (text: string) => [...new Set(ask(text).hits.map((hit) => hit.title.replace(/ at z = .*/, '')))];
+  expect(rows('D_M 0.5')).toEqual(['Transverse comoving distance']);
+  expect(rows('DM 0.5')).toEqual(['Distance modulus']);
+  expect(rows('dm 0.5')).toEqual(['Transverse comoving distance', 'Distance modulus']);
+});
+
+test('a word that is known somewhere is not taken for a misspelling', () => {
+  expect(ask('survey').hits.every((hit) => hit.detail.includes('Survey grid'))).toBe(true);
+  expect(addresses('plank age 0.5')[0]).toBe(row('planck-2018.times.survey', '0.50'));
+});
+
+test('words of a description find it together, even if one of them is a topic', () => {
+  expect(ask('horizon today').hits[0]?.title).toBe('Particle horizon today');
 });
 
 test('words that name nothing are named', () => {

@@ -6,7 +6,13 @@ function steps(from: number, to: number, per: number, decimals: number): string[
 }
 
 function set(id: string, title: string, kind: string, parameters: IndexedSet['parameters'], age: string): IndexedSet {
-  return { id, title, kind, parameters, milestones: { age_today: age, z_acceleration: '0.63', t_acceleration: '7.7' } };
+  return {
+    id,
+    title,
+    kind,
+    parameters,
+    milestones: { age_today: age, z_acceleration: '0.63', t_acceleration: '7.7', particle_horizon_today: '14153' },
+  };
 }
 
 /** A small index: three grids, four sets, two editions; the older one has no horizons and only the coarse grid. */
@@ -62,6 +68,8 @@ export const sampleIndex: SearchIndex = {
       unit: 'Mpc',
       topic: 'distances',
     },
+    { id: 'D_M_Mpc', title: 'Transverse comoving distance', also: ['D_M'], unit: 'Mpc', topic: 'distances' },
+    { id: 'mu_mag', title: 'Distance modulus', also: ['DM', 'mu'], unit: 'mag', topic: 'distances' },
     {
       id: 'D_C_Mpc',
       title: 'Line-of-sight comoving distance',
@@ -76,6 +84,7 @@ export const sampleIndex: SearchIndex = {
     { id: 'E', title: 'Expansion rate in units of today’s', also: ['E', 'E(z)'], unit: '', topic: 'densities' },
   ],
   milestones: [
+    { id: 'particle_horizon_today', title: 'Particle horizon today', also: [], unit: 'Mpc' },
     { id: 'age_today', title: 'Age today', also: ['t_0', 'age of the universe'], unit: 'Gyr' },
     {
       id: 'z_equality',

@@ -1,7 +1,8 @@
+import { gzipSync } from 'node:zlib';
 import type { BrowserContext, Page } from 'playwright-core';
 import { afterEach, beforeEach, expect, test } from 'vitest';
 import { newContext, site } from './harness.ts';
-import { distText, tablePages } from './pages.ts';
+import { distText, plainText, tablePages } from './pages.ts';
 
 let context: BrowserContext;
 let page: Page;
@@ -76,7 +77,7 @@ test('the first result shows the value that stands in the CSV', async () => {
   const [table = '', anchor = ''] = (await firstAddress()).slice(site.base.length).split('/#z=');
   const [head = '', ...lines] = distText(`${table}.csv`).split('\n');
   const cell = lines.find((line) => line.startsWith(`${anchor},`))?.split(',')[head.split(',').indexOf('D_L_Mpc')];
-  expect(await value.textContent()).toBe(`${cell} Mpc`);
+  expect(plainText((await value.textContent()) ?? '')).toBe(`${cell} Mpc`);
 });
 
 test('a slash leads to the field, the arrows through the results, Enter opens the first', async () => {
@@ -114,6 +115,27 @@ test('Enter that comes before the index is loaded still opens the first result',
   await page.keyboard.type('0.73');
   await page.keyboard.press('Enter');
   await page.waitForURL(/#z=0\.73$/);
+});
+
+test('a value is printed with real signs, powers of ten and units', async () => {
+  await ask('critical density');
+  await expect
+    .poll(() => results().first().locator('.value').innerHTML())
+    .toMatch(/×\s10<sup>−27<\/sup> kg\/m<sup>3<\/sup>$/u);
+});
+
+test('the index is small', () => {
+  expect(gzipSync(distText('search-index.json')).length).toBeLessThan(60_000);
+});
+
+test('what cannot be loaded is said, and the next key tries again', async () => {
+  await page.route('**/search-index.json', (route) => route.abort());
+  await ask('age');
+  expect(await status().textContent()).toMatch(/could not be loaded/);
+  await page.unroute('**/search-index.json');
+  await field().fill('age 1');
+  await results().first().waitFor();
+  complaints = complaints.filter((text) => !text.includes('ERR_FAILED'));
 });
 
 test('the index is loaded when somebody turns to the search, and once', async () => {

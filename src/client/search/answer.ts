@@ -1,4 +1,5 @@
 import type { IndexedColumn } from '../../site/searchIndexTypes.ts';
+import { realMinus } from '../../site/writtenNumber.ts';
 import { targetsByWords } from './findByWords.ts';
 import type { Hit } from './hit.ts';
 import type { Library } from './library.ts';
@@ -25,7 +26,7 @@ export function answer(text: string, library: Library): Answer {
   const scope = scopeOf(library, query);
   if (!scope) return NOTHING;
   const named = query.targets.length > 0;
-  const targets = named ? query.targets : targetsByWords(library, scope.unknown);
+  const targets = named ? query.targets : describedTargets(library, scope);
   const unknown = named || targets.length === 0 ? scope.unknown : [];
   const found = query.redshifts.length + query.values.length > 0 ? byNumber : byName;
   const { hits, notes } = found(library, scope, query, targets);
@@ -34,6 +35,13 @@ export function answer(text: string, library: Library): Answer {
     notes: [...notes, ...unknown.map((word) => `Nothing here is called “${word}”.`)],
     hits: distinct(hits),
   };
+}
+
+/** What no name of a quantity said is looked for in their descriptions: "horizon today", of which "horizon" is a topic too. */
+function describedTargets(library: Library, scope: Scope): readonly Target[] {
+  if (scope.unknown.length === 0) return [];
+  const withTopics = targetsByWords(library, [...scope.topicWords, ...scope.unknown]);
+  return withTopics.length > 0 ? withTopics : targetsByWords(library, scope.unknown);
 }
 
 /**
@@ -84,7 +92,7 @@ function reading({ index }: Library, targets: readonly Target[], query: Query, s
   });
   const different = [...new Set(titles)];
   const names = different.length <= FEW || query.names.length === 0 ? different.slice(0, FEW) : query.names;
-  const redshifts = query.redshifts.map(({ text }) => `z = ${text}`);
+  const redshifts = query.redshifts.map(({ text }) => `z = ${realMinus(text)}`);
   const edition = query.edition === undefined ? [] : [`edition ${query.edition}`];
   const joined = names === query.names ? names.join(' ') : names.join(' or ');
   return [joined, ...redshifts, scope.known.join(' '), ...edition].filter((part) => part !== '').join(', ');

@@ -4,10 +4,19 @@ export interface Hit {
   readonly title: string;
   /** Where it stands: set, grid, edition. */
   readonly detail: string;
-  /** The value, with its unit, where the index knows it. */
-  readonly value?: string;
+  /** The value, where the index knows it. */
+  readonly value?: Value;
   /** The cell of a CSV file that holds the value, where the index does not. */
   readonly cell?: Cell;
+}
+
+export interface Value {
+  /** As the keeper or the CSV writes it. */
+  readonly written: string;
+  /** Standard uncertainty. */
+  readonly u?: string;
+  /** Plain text, "" if dimensionless. */
+  readonly unit: string;
 }
 
 export interface Cell {
@@ -15,11 +24,6 @@ export interface Cell {
   readonly redshift: string;
   readonly column: string;
   readonly unit: string;
-}
-
-/** "67.36 km/s/Mpc"; a number without unit stands alone. */
-export function withUnit(value: string, unit: string): string {
-  return unit === '' ? value : `${value} ${unit}`;
 }
 
 export function upperFirst(text: string): string {

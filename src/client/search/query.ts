@@ -3,7 +3,7 @@ import { belongsToName, type SetNames, setNames } from './setNames.ts';
 import { STOP_WORDS } from './stopWords.ts';
 import { type Token, tokens } from './tokens.ts';
 import type { TypedNumber } from './typedNumber.ts';
-import { keyOf, type Target, type Vocabulary, vocabulary } from './vocabulary.ts';
+import { keyOf, type Target, targetsOf, type Vocabulary, vocabulary } from './vocabulary.ts';
 
 /** What a query asks for. */
 export interface Query {
@@ -110,8 +110,8 @@ function nameAt(list: readonly Token[], n: number, { names, longest }: Vocabular
   for (let length = Math.min(longest, list.length - n); length > 0; length--) {
     const run = list.slice(n, n + length);
     if (run.some((token) => token.value !== undefined)) continue;
-    const targets = names.get(keyOf(run.map((token) => token.term)));
-    if (targets) return { length, targets };
+    const called = names.get(keyOf(run.map((token) => token.term)));
+    if (called) return { length, targets: targetsOf(called, run) };
   }
   return undefined;
 }

@@ -1,5 +1,6 @@
 import { address } from '../../site/addresses.ts';
 import type { IndexedColumn, IndexedSet } from '../../site/searchIndexTypes.ts';
+import { realMinus } from '../../site/writtenNumber.ts';
 import { bestGrid, type Place } from './bestGrid.ts';
 import { type Hit, upperFirst } from './hit.ts';
 import type { Scope } from './scope.ts';
@@ -74,7 +75,7 @@ function rowHit(
   const redshift = grid.redshifts[row] as string;
   const hit = {
     href: address.row(scope.edition.number, table, redshift),
-    title: `${upperFirst(column?.title ?? topic)} at z = ${redshift}`,
+    title: `${upperFirst(column?.title ?? topic)} at z = ${realMinus(redshift)}`,
     detail: standing(scope, set, grid),
   };
   if (!column) return hit;
@@ -84,11 +85,11 @@ function rowHit(
 
 function describe({ grid, standing }: Place, { text }: TypedNumber): string | undefined {
   if ('at' in standing) return undefined;
-  const written = (row: number | undefined): string | undefined => grid.redshifts[row ?? -1];
+  const written = (row: number | undefined): string => realMinus(grid.redshifts[row ?? -1] ?? '');
   const below = written(standing.below);
   const above = written(standing.above);
-  const name = `“${grid.title}”`;
-  if (below === undefined) return `${text} lies below every row of ${name}, which begins at ${above}.`;
-  if (above === undefined) return `${text} lies beyond every row of ${name}, which ends at ${below}.`;
-  return `${text} is not on ${name}; nearest ${below} and ${above}.`;
+  const asked = realMinus(text);
+  if (below === '') return `${asked} lies below every row of “${grid.title}”, which begins at ${above}.`;
+  if (above === '') return `${asked} lies beyond every row of “${grid.title}”, which ends at ${below}.`;
+  return `${asked} is not on “${grid.title}”; nearest ${below} and ${above}.`;
 }

@@ -17,6 +17,8 @@ export interface Scope {
   /** The words that name a set, a grid or a topic, and those that name none. */
   readonly known: readonly string[];
   readonly unknown: readonly string[];
+  /** Those of the known words that name topics. */
+  readonly topicWords: readonly string[];
 }
 
 /** Narrows the index to what the words of a query name. Undefined while there is no edition. */
@@ -38,6 +40,7 @@ export function scopeOf(library: Library, query: Query): Scope | undefined {
     named: { sets: sets.by.length > 0, grids: grids.by.length > 0, topics: topics.by.length > 0 },
     known,
     unknown: query.words.filter((word) => !known.includes(word)),
+    topicWords: topics.by,
   };
 }
 

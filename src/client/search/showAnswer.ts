@@ -1,6 +1,7 @@
 import type { Answer } from './answer.ts';
 import { cellOf } from './cellOf.ts';
-import { type Hit, withUnit } from './hit.ts';
+import type { Hit } from './hit.ts';
+import { showValue } from './showValue.ts';
 
 /** Longer lists are cut: whoever gets this many results adds a word. */
 const MOST_SHOWN = 20;
@@ -34,7 +35,9 @@ function line(hit: Hit): HTMLElement {
   const item = document.createElement('li');
   const link = element('a', 'title', hit.title);
   link.setAttribute('href', hit.href);
-  item.append(link, ' ', element('span', 'value', hit.value ?? ''), ' ', element('span', 'detail', hit.detail));
+  const value = element('span', 'value', '');
+  if (hit.value) showValue(value, hit.value);
+  item.append(link, ' ', value, ' ', element('span', 'detail', hit.detail));
   return item;
 }
 
@@ -63,7 +66,7 @@ export async function addValues(
     const place = lines[n]?.querySelector('.value');
     if (!place || !cell || cell.csv !== csv) continue;
     const value = cellOf(text, cell);
-    if (value !== undefined)
-      place.textContent = value === '' ? 'blank: does not exist here' : withUnit(value, cell.unit);
+    if (value === '') place.textContent = 'blank: does not exist here';
+    else if (value !== undefined) showValue(place, { written: value, unit: cell.unit });
   }
 }

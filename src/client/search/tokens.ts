@@ -4,6 +4,8 @@ import { plainText } from '../plainText.ts';
 export interface Token {
   /** As typed, in plain ASCII and lower case. */
   readonly text: string;
+  /** As typed, in plain ASCII. */
+  readonly written: string;
   /** What is compared: a word in the singular without underscores, a number in its shortest form. */
   readonly term: string;
   /** The number, where it is one. */
@@ -11,16 +13,15 @@ export interface Token {
 }
 
 // A hyphen belongs to a number only after a space, "=", "(" or ":", so that "gamma-2018" keeps its 2018.
-const PIECE = /[a-z][a-z0-9]*(?:_[a-z0-9]+)*|(?:(?<![^\s=(:])-)?(?:\d+(?:\.\d+)?|\.\d+)(?:e[+-]?\d+)?/g;
+const PIECE = /[a-z][a-z0-9]*(?:_[a-z0-9]+)*|(?:(?<![^\s=(:])-)?(?:\d+(?:\.\d+)?|\.\d+)(?:e[+-]?\d+)?/gi;
 
 /** Splits text into words, which keep their underscores ("D_L"), and whole numbers ("0.500", "1e-4"). */
 export function tokens(text: string): Token[] {
-  const plain = plainText(text)
-    .toLowerCase()
-    .replace(/\bz(?=-?\.?\d)/g, 'z ');
-  return Array.from(plain.matchAll(PIECE), ([piece]) => {
-    if (/^[a-z]/.test(piece)) return { text: piece, term: singular(piece.replaceAll('_', '')) };
-    return { text: piece, term: String(Number(piece)), value: Number(piece) };
+  const plain = plainText(text).replace(/\bz(?=-?\.?\d)/gi, 'z ');
+  return Array.from(plain.matchAll(PIECE), ([written]) => {
+    const text = written.toLowerCase();
+    if (/^[a-z]/.test(text)) return { text, written, term: singular(text.replaceAll('_', '')) };
+    return { text, written, term: String(Number(text)), value: Number(text) };
   });
 }
 

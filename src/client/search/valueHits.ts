@@ -1,6 +1,6 @@
 import { address } from '../../site/addresses.ts';
 import type { IndexedSet, SearchIndex } from '../../site/searchIndexTypes.ts';
-import { type Hit, upperFirst, withUnit } from './hit.ts';
+import { type Hit, upperFirst } from './hit.ts';
 import { unitKey } from './query.ts';
 import { standing } from './rowHits.ts';
 import type { Scope } from './scope.ts';
@@ -48,24 +48,17 @@ function everyTarget(index: SearchIndex): Target[] {
 /** The value of a milestone or parameter in a set; undefined where it does not exist, and for a column. */
 function valueHit(index: SearchIndex, scope: Scope, set: IndexedSet, { kind, at }: Target) {
   if (kind === 'column') return undefined;
+  const thing = kind === 'milestone' ? index.milestones[at] : index.parameters[at];
+  const known = kind === 'milestone' ? [set.milestones[thing?.id ?? '']] : set.parameters[thing?.id ?? ''];
+  const [written, u] = known ?? [];
+  if (!thing || written === undefined) return undefined;
+  const { title, unit } = thing;
   const page = address.set(scope.edition.number, set.id);
-  const detail = standing(scope, set, undefined);
-  if (kind === 'milestone') {
-    const milestone = index.milestones[at];
-    const value = set.milestones[milestone?.id ?? ''];
-    if (!milestone || value === undefined) return undefined;
-    const hit: Hit = {
-      href: `${page}#${milestone.id}`,
-      title: upperFirst(milestone.title),
-      detail,
-      value: withUnit(value, milestone.unit),
-    };
-    return { hit, number: Number(value), unit: milestone.unit };
-  }
-  const parameter = index.parameters[at];
-  const [value, u] = set.parameters[parameter?.id ?? ''] ?? [];
-  if (!parameter || value === undefined) return undefined;
-  const written = withUnit(u === undefined ? value : `${value} ± ${u}`, parameter.unit);
-  const hit: Hit = { href: page, title: upperFirst(parameter.title), detail, value: written };
-  return { hit, number: Number(value), unit: parameter.unit };
+  const hit: Hit = {
+    href: kind === 'milestone' ? `${page}#${thing.id}` : page,
+    title: upperFirst(title),
+    detail: standing(scope, set, undefined),
+    value: u === undefined ? { written, unit } : { written, u, unit },
+  };
+  return { hit, number: Number(written), unit };
 }

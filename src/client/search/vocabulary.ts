@@ -1,6 +1,6 @@
 import type { SearchIndex } from '../../site/searchIndexTypes.ts';
 import { STOP_WORDS } from './stopWords.ts';
-import { tokens } from './tokens.ts';
+import { type Token, tokens } from './tokens.ts';
 
 /** What a name stands for. */
 export interface Target {
@@ -12,9 +12,15 @@ export interface Target {
 /** Every name by which something can be asked for. */
 export interface Vocabulary {
   /** From the key of a name, see `keyOf`. */
-  readonly names: ReadonlyMap<string, readonly Target[]>;
+  readonly names: ReadonlyMap<string, readonly Called[]>;
   /** The largest number of words in a name. */
   readonly longest: number;
+}
+
+/** A thing, and the symbols with one key by which it goes: "D_M" and "DM" are different things. */
+export interface Called {
+  readonly target: Target;
+  readonly symbols: Set<string>;
 }
 
 /** Terms run together: "D_L", "d l" and "DL" have one key, and so have "age of the universe" and "age universe". */
@@ -23,15 +29,17 @@ export function keyOf(terms: readonly string[]): string {
 }
 
 export function vocabulary(index: SearchIndex): Vocabulary {
-  const names = new Map<string, Target[]>();
+  const names = new Map<string, Called[]>();
   let longest = 1;
-  const add = (name: string, target: Target): void => {
-    const terms = tokens(name).map((token) => token.term);
-    const key = keyOf(terms);
-    const known = names.get(key) ?? [];
-    if (key === '' || known.some((other) => other.kind === target.kind && other.at === target.at)) return;
-    names.set(key, [...known, target]);
-    longest = Math.max(longest, terms.length);
+  const add = (name: string, { kind, at }: Target): void => {
+    const words = tokens(name);
+    const key = keyOf(words.map(({ term }) => term));
+    if (key === '') return;
+    const called = names.get(key) ?? [];
+    const known = called.find(({ target }) => target.kind === kind && target.at === at);
+    if (known) known.symbols.add(symbolOf(words));
+    else names.set(key, [...called, { target: { kind, at }, symbols: new Set([symbolOf(words)]) }]);
+    longest = Math.max(longest, words.length);
   };
   const addAll = (kind: Target['kind'], things: readonly { title: string; also: readonly string[] }[]): void => {
     things.forEach((thing, at) => {
@@ -42,4 +50,23 @@ export function vocabulary(index: SearchIndex): Vocabulary {
   addAll('milestone', index.milestones);
   addAll('parameter', index.parameters);
   return { names, longest };
+}
+
+/**
+ * The things called so. Where a symbol was typed to the letter, others of the same kind that share only its key are left
+ * out.
+ */
+export function targetsOf(called: readonly Called[], typed: readonly Token[]): Target[] {
+  const symbol = symbolOf(typed);
+  const isMeant = ({ symbols }: Called): boolean => symbol !== '' && symbols.has(symbol);
+  return called
+    .filter((one) => isMeant(one) || !called.some((other) => isMeant(other) && other.target.kind === one.target.kind))
+    .map(({ target }) => target);
+}
+
+/** A single word that is written as symbols are, "D_M", "DM", "t"; "" for ordinary words. */
+function symbolOf(words: readonly Token[]): string {
+  const [first, ...more] = words;
+  const isSymbol = first !== undefined && more.length === 0 && /^.$|_|^.+[A-Z]/.test(first.written);
+  return isSymbol ? first.written : '';
 }

@@ -1,3 +1,4 @@
+import { realMinus } from '../../site/writtenNumber.ts';
 import { nearest } from '../nearest.ts';
 import type { Parts, Row } from './parts.ts';
 
@@ -28,14 +29,14 @@ export function markRows({ table }: Parts, rows: readonly Row[]): void {
 export function sayFound(asked: string, { rows, exact }: Found): (string | HTMLAnchorElement)[] {
   const [first, second] = rows;
   if (!first) return ['This table has no rows.'];
-  if (exact) return [`z = ${first.written}`];
-  if (second) return [`${asked} is not on this grid; nearest `, linkTo(first), ' and ', linkTo(second), '.'];
-  return [`${asked} lies outside this grid; the nearest row is `, linkTo(first), '.'];
+  if (exact) return [`z = ${realMinus(first.written)}`];
+  if (second) return [`${realMinus(asked)} is not on this grid; nearest `, linkTo(first), ' and ', linkTo(second), '.'];
+  return [`${realMinus(asked)} lies outside this grid; the nearest row is `, linkTo(first), '.'];
 }
 
 function linkTo({ written, element }: Row): HTMLAnchorElement {
   const link = document.createElement('a');
   link.href = `#${element.id}`;
-  link.textContent = written;
+  link.textContent = realMinus(written);
   return link;
 }

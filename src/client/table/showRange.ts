@@ -1,3 +1,4 @@
+import { realMinus } from '../../site/writtenNumber.ts';
 import type { Parts } from './parts.ts';
 import type { Range } from './rangeOf.ts';
 
@@ -12,7 +13,8 @@ export function showRange({ table, rows }: Parts, { start, end }: Range): void {
 /** "51 of 301 rows, z from 0.50 to 1.00"; "301 rows" when all are shown. */
 export function countRows({ rows }: Parts, { start, end }: Range): string {
   const shown = end - start;
+  const written = (row: number): string => realMinus(rows[row]?.written ?? '');
   if (shown === rows.length) return `${rows.length} rows`;
   if (shown <= 0) return `No row in this range; the table has ${rows.length}`;
-  return `${shown} of ${rows.length} rows, z from ${rows[start]?.written} to ${rows[end - 1]?.written}`;
+  return `${shown} of ${rows.length} rows, z from ${written(start)} to ${written(end - 1)}`;
 }
