@@ -4,12 +4,12 @@ import { type Hit, upperFirst } from './hit.ts';
 import { editionOf, exists, standing, tableId } from './rowHits.ts';
 import type { Scope } from './scope.ts';
 
-/** The page of each quantity: its formula, unit and source. */
+/** The page of each quantity. */
 export function quantityHits(columns: readonly IndexedColumn[]): Hit[] {
-  return columns.map(({ id, title, topic, unit }) => ({
+  return columns.map(({ id, title, topic }) => ({
     href: address.quantity(id),
     title: upperFirst(title),
-    detail: ['Definition and formula', ...(topic ? [topic] : []), ...(unit === '' ? [] : [`in ${unit}`])].join(' · '),
+    detail: ['Definition and formula', ...(topic ? [topic] : [])].join(' · '),
   }));
 }
 
