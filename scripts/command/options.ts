@@ -37,24 +37,34 @@ export function readOptions(help: CommandHelp, args: readonly string[]): Folders
     console.log(helpText(help));
     return undefined;
   }
-  const typedIn = process.env.INIT_CWD ?? process.cwd();
   return {
-    content: values.content === undefined ? resolve(projectRoot, 'content') : resolve(typedIn, values.content),
-    out: values.out === undefined ? undefined : resolve(typedIn, values.out),
+    content: contentFolder(values.content),
+    out: values.out === undefined ? undefined : typedFolder('out', values.out),
   };
+}
+
+/** The folder of `--content`, or the shipped one. */
+export function contentFolder(typed: string | undefined): string {
+  return typed === undefined ? resolve(projectRoot, 'content') : typedFolder('content', typed);
+}
+
+function typedFolder(name: 'content' | 'out', typed: string): string {
+  if (typed.trim() === '') throw new UsageError(`--${name} needs a folder.`);
+  return resolve(process.env.INIT_CWD ?? process.cwd(), typed);
+}
+
+/** What the parser of options found wrong, in one line, and where to read more. */
+export function optionError(command: string, error: Error): UsageError {
+  const hint = `Options follow a lone --, as in: npm run ${command} -- --help`;
+  return new UsageError(`${firstSentence(error)}\n${hint}`);
 }
 
 function parse(help: CommandHelp, args: readonly string[]) {
   try {
     const options = { content: { type: 'string' }, out: { type: 'string' }, help: { type: 'boolean' } } as const;
-    const { values } = parseArgs({ args: [...args], options, strict: true });
-    for (const name of ['content', 'out'] as const) {
-      if (values[name]?.trim() === '') throw new UsageError(`--${name} needs a folder.`);
-    }
-    return values;
+    return parseArgs({ args: [...args], options, strict: true }).values;
   } catch (error) {
-    const hint = `Options follow a lone --, as in: npm run ${help.name} -- --help`;
-    throw new UsageError(`${firstSentence(error as Error)}\n${hint}`);
+    throw optionError(help.name, error as Error);
   }
 }
 

@@ -5,7 +5,7 @@ import type { Problem } from './types.ts';
 import type { YamlFile } from './yamlFile.ts';
 
 /** More rows in one table would help nobody; a step written too small reaches this at once. */
-const MOST_REDSHIFTS = 100_000;
+export const MOST_REDSHIFTS = 100_000;
 
 /**
  * The redshifts of a grid in ascending order: its segments, joined without doubles (a join keeps its first writing),

@@ -28,8 +28,12 @@ export const NEXT_TO_ZERO = 2 ** -20;
 /** Parts into which a peak is taken to pieces. */
 const FINER = 8;
 
-/** The model in every interval of a grid, rows included. */
-export function betweenRows(model: Background, redshifts: readonly number[]): readonly Between[] {
+/** The model in every interval of a grid, rows included; `part`, if given, leaves out the intervals outside of it. */
+export function betweenRows(
+  model: Background,
+  redshifts: readonly number[],
+  part: readonly [number, number] = [Number.NEGATIVE_INFINITY, Number.POSITIVE_INFINITY],
+): readonly Between[] {
   const parts = redshifts.length <= SHORT ? PARTS_OF_SHORT : PARTS;
   const inside = Array.from({ length: parts - 1 }, (_, k) => (k + 1) / parts);
   const shares = [...new Set([NEXT_TO_ROW, ...inside, 1 - NEXT_TO_ROW])];
@@ -38,7 +42,10 @@ export function betweenRows(model: Background, redshifts: readonly number[]): re
     const lowest = from === 0 ? NEXT_TO_ZERO * to : from;
     return { interval, z: [lowest, ...shares.map((share) => from + share * (to - from)), to] };
   });
-  return evaluated(model, intervals);
+  return evaluated(
+    model,
+    intervals.filter((_, k) => (redshifts[k] ?? 0) >= part[0] && (redshifts[k + 1] ?? 0) <= part[1]),
+  );
 }
 
 /** The model at more places around each of the peaks; many columns have theirs in the same place. */

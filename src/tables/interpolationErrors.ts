@@ -20,6 +20,8 @@ export interface Interpolated {
   readonly columns: readonly QuantityId[];
   /** Significant digits of the cells. */
   readonly digits: number;
+  /** Only the intervals between these redshifts; all rows may take part in interpolating there. */
+  readonly part?: readonly [number, number];
 }
 
 /**
@@ -37,7 +39,7 @@ export interface Interpolated {
  */
 export function interpolationErrors(asked: Interpolated): readonly ColumnInterpolation[] {
   const { model, redshifts, epochs, digits } = asked;
-  const between = betweenRows(model, redshifts);
+  const between = betweenRows(model, redshifts, asked.part);
   const columns = asked.columns.map((id) => gridColumn(id, model, redshifts, epochs, digits));
   const rough = columns.map((column) => roughPeaks(column, between));
   const finer = aroundPeaks(

@@ -23,8 +23,8 @@ export function intervalErrors(
   truths: readonly (number | null)[],
   scale: number | null,
 ): Errors {
-  const linearAbsolute = absoluteErrors(column, run, stencils(column, run, places, 2), truths);
-  const lagrangeAbsolute = absoluteErrors(column, run, stencils(column, run, places, 4), truths);
+  const linearAbsolute = absoluteErrors(column, stencils(column, run, places, 2), truths);
+  const lagrangeAbsolute = absoluteErrors(column, stencils(column, run, places, 4), truths);
   const relative = (error: number, k: number) => (error === 0 ? 0 : error / (scale ?? Math.abs(truths[k] ?? 0)));
   return {
     linearAbsolute,
@@ -36,7 +36,6 @@ export function intervalErrors(
 
 function absoluteErrors(
   { cells, halfUnits }: GridColumn,
-  { start }: Run,
   stencilAt: readonly Stencil[],
   truths: readonly (number | null)[],
 ): number[] {
@@ -46,8 +45,8 @@ function absoluteErrors(
     let [value, rounding] = [0, 0];
     for (let j = 0; j < weights.length; j++) {
       const weight = weights[j] ?? 0;
-      value += weight * (cells[start + first + j] ?? 0);
-      rounding += Math.abs(weight) * (halfUnits[start + first + j] ?? 0);
+      value += weight * (cells[first + j] ?? 0);
+      rounding += Math.abs(weight) * (halfUnits[first + j] ?? 0);
     }
     return Math.abs(value - truth) + rounding;
   });
@@ -59,11 +58,16 @@ const known = new WeakMap<Between, Map<string, readonly Stencil[]>>();
 function stencils({ redshifts }: GridColumn, { start, end }: Run, places: Between, points: number): readonly Stencil[] {
   const here = known.get(places) ?? new Map<string, readonly Stencil[]>();
   known.set(places, here);
-  const key = `${start} ${end} ${points}`;
+  // All rows that either method can take: two before the interval and two after it, or more on one side.
+  const from = Math.max(start, places.interval - 2);
+  const nodes = redshifts.slice(from, Math.min(end, places.interval + 4));
+  const key = `${from} ${nodes.length} ${points}`;
   const found = here.get(key);
   if (found !== undefined) return found;
-  const nodes = redshifts.slice(start, end);
-  const made = places.z.map((z) => lagrangeStencil(nodes, places.interval - start, points, z));
+  const made = places.z.map((z) => {
+    const { first, weights } = lagrangeStencil(nodes, places.interval - from, points, z);
+    return { first: from + first, weights };
+  });
   here.set(key, made);
   return made;
 }
