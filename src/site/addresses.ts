@@ -19,12 +19,13 @@ export const address = {
   /** The row of one redshift, written as its grid writes it. */
   row: (edition: string, table: string, redshift: string) =>
     `${folder('editions', edition, 'tables', table)}#${rowId(redshift)}`,
-  /** The CSV of a table or of `<set>.milestones`. */
+  /** The CSV of a table, of what goes with it (`<table>.u`, `<table>.interpolation`) or of `<set>.milestones`. */
   csv: (edition: string, table: string) => `${folder('editions', edition, 'tables')}${table}.csv`,
   quantities: () => folder('quantities'),
   quantity: (column: string) => folder('quantities', column),
   methods: () => folder('methods'),
   checkedAgainst: () => folder('checked-against'),
+  interpolation: () => folder('interpolation'),
   search: () => folder('search'),
   icon: () => `${base}favicon.svg`,
   searchIndex: () => `${base}search-index.json`,

@@ -8,6 +8,7 @@ import { renderFormula } from './formula.ts';
 import { type ParameterLine, parameterLines } from './parameterLines.ts';
 import { setTitle } from './setTitle.ts';
 import { symbolOfName } from './symbolOfName.ts';
+import type { BetweenRows } from './table/betweenRows.ts';
 import { unitHtml } from './unitText.ts';
 import { writtenNumber } from './writtenNumber.ts';
 
@@ -24,6 +25,8 @@ export interface Colophon {
     readonly unit: string;
     readonly source: string;
   }[];
+  /** What interpolation in z between the rows is worth. */
+  readonly between: BetweenRows;
   readonly method: string;
   /** Address of the methods page. */
   readonly methods: string;
@@ -36,7 +39,14 @@ export interface Colophon {
 }
 
 /** `table` is the id of the table whose stamp it is, `page` the address of its page. */
-export function colophon(site: SiteSettings, stamp: Stamp, state: ShownState, table: string, page: string): Colophon {
+export function colophon(
+  site: SiteSettings,
+  stamp: Stamp,
+  state: ShownState,
+  table: string,
+  page: string,
+  between: BetweenRows,
+): Colophon {
   const { set, edition, checksum } = stamp;
   const title = setTitle(set);
   return {
@@ -59,6 +69,7 @@ export function colophon(site: SiteSettings, stamp: Stamp, state: ShownState, ta
       unit: unitHtml(constant.unit),
       source: constant.source,
     })),
+    between,
     method: stamp.method,
     methods: address.methods(),
     file: { name: `${table}.csv`, address: address.csv(edition, table), checksum },

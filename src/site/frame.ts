@@ -10,6 +10,8 @@ export interface Frame {
   readonly links: readonly { readonly text: string; readonly address: string; readonly here: boolean }[];
   /** Published values beside ours. */
   readonly checked: string;
+  /** How to interpolate in the tables. */
+  readonly between: string;
   readonly current: { readonly number: string; readonly address: string };
 }
 
@@ -28,6 +30,7 @@ export async function frame(place?: string): Promise<Frame> {
       here: link === place,
     })),
     checked: address.checkedAgainst(),
+    between: address.interpolation(),
     current: { number, address: address.edition(number) },
   };
 }

@@ -40,9 +40,10 @@ function section({ id, title, body, lists }: MethodText): MethodSection {
   return { id, title, html, ...(lists === 'constants' ? { constants: constantLines() } : {}) };
 }
 
-/** A column, or the page of published values. */
+/** A column, or one of the pages that go with the methods. */
 function methodLink(target: string): string | undefined {
-  return target === 'checked-against' ? address.checkedAgainst() : quantityLink(target);
+  if (target === 'checked-against') return address.checkedAgainst();
+  return target === 'interpolation' ? address.interpolation() : quantityLink(target);
 }
 
 function constantLines(): readonly ConstantLine[] {

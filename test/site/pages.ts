@@ -47,6 +47,7 @@ export const TEMPLATES = {
   quantity: /^quantities\/[^/]+\/$/,
   methods: /^methods\/$/,
   checkedAgainst: /^checked-against\/$/,
+  interpolation: /^interpolation\/$/,
   search: /^search\/$/,
   notFound: /^404\.html$/,
 } as const;

@@ -82,4 +82,12 @@ Pages use the minus sign and thin spaces of print; files are plain ASCII, with a
 cells, one header row of column ids, and a line feed after each row. They hold no other lines, so that any program can
 read them. For further computation take the file, not the page.`,
   },
+  {
+    id: 'interpolation',
+    title: 'Between the rows',
+    body: `
+Each table says how far its columns can be interpolated: the largest error of a straight line between two rows, and of
+Lagrange's polynomial through four. What is stated, and which steps a wanted accuracy needs, is told
+[on a page of its own](interpolation).`,
+  },
 ];

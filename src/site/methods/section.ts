@@ -5,7 +5,7 @@ export interface MethodText {
   readonly title: string;
   /**
    * Markdown with formulas, ASCII. `[text](D_L_Mpc)` leads to a quantity, `[text](#blanks)` to a section,
-   * `[text](checked-against)` to the page of published values.
+   * `[text](checked-against)` to the page of published values, `[text](interpolation)` to that between the rows.
    */
   readonly body: string;
   /** What the program lists below the text. */

@@ -7,6 +7,7 @@ import type { Press } from '../press.ts';
 import { type RunningHead, runningHead } from '../runningHead.ts';
 import { setTitle } from '../setTitle.ts';
 import { TOPIC_TEXT } from '../topicText.ts';
+import { betweenRows } from './betweenRows.ts';
 import { cautions } from './cautions.ts';
 import { type ColumnView, columnViews } from './columnViews.ts';
 import { type Fit, fitOf } from './fitOf.ts';
@@ -51,6 +52,13 @@ export function tableView(press: Press, pressed: EditionTables, table: Table): T
     thumbs: thumbIndex(table.redshifts),
     cautions: cautions(table),
     turnTo: turnTo(pressed, table),
-    colophon: colophon(press.content.site, table.stamp, state, table.id, page),
+    colophon: colophon(
+      press.content.site,
+      table.stamp,
+      state,
+      table.id,
+      page,
+      betweenRows(edition.number, table, columns),
+    ),
   };
 }
