@@ -166,7 +166,7 @@ const ROUNDING = 1e-13;
 describe.each(['planck-2018-lensing', 'desi-2025-w0wa', 'closed-matter'])('of the set %s', (set) => {
   const model = shipped(set);
 
-  test.each(['reading', 'logarithmic', 'future'])(
+  test.each(['reading', 'logarithmic', 'future', 'survey'])(
     'on the %s grid, errors of every column are those of ten times as many places, and at most a hundredth more',
     (gridId) => {
       const redshifts = rowsOf(gridId);
