@@ -5,17 +5,16 @@ export function isUnchecked({ note }: ParameterSet): boolean {
   return /from memory/i.test(note ?? '');
 }
 
-/** What is uncertain about the parameters of a set, in one sentence of HTML. */
+const PALER =
+  'Digits in paler ink are finer than the parameters warrant: they compare tables, they do not measure the sky.';
+
+/** What is uncertain about the numbers of a set, in one or two sentences of HTML. */
 export function uncertaintySentence({ parameters, uncertainties }: ParameterSet): string {
-  const u = uncertainties.H0;
-  if (u === undefined) {
-    return Object.keys(uncertainties).length > 0
-      ? 'The parameters are uncertain; the digits printed are those of the values as given.'
-      : 'The parameters are taken as exact.';
+  if (Object.keys(uncertainties).length === 0) {
+    return 'The set gives no uncertainties: its parameters are taken as exact, and no digit is paler.';
   }
+  const u = uncertainties.H0;
+  if (u === undefined) return PALER;
   const percent = (100 * Number(u)) / Number(parameters.H0);
-  return (
-    `<i>H</i><sub>0</sub> is known to ${percent.toPrecision(1)} per cent: digits beyond that compare ` +
-    'tables, they do not measure the sky.'
-  );
+  return `<i>H</i><sub>0</sub> is known to ${percent.toPrecision(1)} per cent. ${PALER}`;
 }

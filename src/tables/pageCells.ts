@@ -12,6 +12,8 @@ const PUNCTUATION_SPACE = '\u2008';
 export interface PageColumn {
   /** The column is printed in units of 10^exponent; null where cells stand as they are. */
   readonly exponent: number | null;
+  /** Decimals to which the cells are padded. */
+  readonly decimals: number;
   /** One text for each value: '' for blanks, padded so that points align when set flush right in tabular figures. */
   readonly cells: readonly string[];
 }
@@ -40,29 +42,31 @@ export function pageColumn(
   const calm = largest <= CALM.largest && largest >= CALM.smallest;
   const sharing = Math.min(...sizes) - largest >= SMALLEST_PLAIN;
   const exponent = calm || !sharing ? null : largest;
-  const texts = rounded.map((value) => (value === null ? '' : cellText(value, exponent ?? 0)));
+  const texts = rounded.map((value) => (value === null ? '' : roundedCell(value, exponent ?? 0)));
   const decimals = Math.max(0, ...texts.map(decimalPlaces));
-  return { exponent, cells: texts.map((text) => pad(text, decimals)) };
+  return { exponent, decimals, cells: texts.map((text) => pad(text, decimals)) };
 }
 
 /** One value to `digits` significant digits, set for a page; a power of ten where a plain number would be unwieldy. */
 export function pageNumber(value: number, digits: number, audited?: string): string {
   const rounded = roundValue(value, audited, digits);
   const plainRange = rounded.exponent >= CALM.smallest - 1 && rounded.exponent <= CALM.largest;
-  return plainRange ? cellText(rounded, 0) : withPower(rounded, 0);
+  return plainRange ? roundedCell(rounded, 0) : roundedPower(rounded, 0);
 }
 
 /** Digits of a rounded zero. */
-const ZERO = '0';
+export const ZERO = '0';
 
-function cellText(rounded: RoundedDigits, shift: number): string {
+/** Rounded digits in units of 10^shift, with a power of their own where a plain number would be unwieldy. */
+export function roundedCell(rounded: RoundedDigits, shift: number): string {
   const zero = rounded.digits === ZERO;
   const exponent = rounded.exponent - shift;
-  if (!zero && (exponent < SMALLEST_PLAIN || exponent > CALM.largest)) return withPower(rounded, shift);
+  if (!zero && (exponent < SMALLEST_PLAIN || exponent > CALM.largest)) return roundedPower(rounded, shift);
   return (rounded.negative ? MINUS : '') + grouped(plain(rounded.digits, zero ? 0 : exponent));
 }
 
-function withPower({ negative, digits, exponent }: RoundedDigits, shift: number): string {
+/** Rounded digits in units of 10^shift, with a power of their own. */
+export function roundedPower({ negative, digits, exponent }: RoundedDigits, shift: number): string {
   const power = superscript(exponent - shift);
   return `${negative ? MINUS : ''}${plain(digits, 0)}${THIN_SPACE}×${THIN_SPACE}10${power}`;
 }
@@ -79,7 +83,8 @@ function decimalPlaces(text: string): number {
   return point < 0 ? 0 : text.length - point - 1;
 }
 
-function pad(text: string, decimals: number): string {
+/** A cell padded on the right to so many decimals. */
+export function pad(text: string, decimals: number): string {
   if (text === '' || text.includes('×') || decimals === 0) return text;
   const missing = decimals - decimalPlaces(text);
   return text + (text.includes('.') ? '' : PUNCTUATION_SPACE) + FIGURE_SPACE.repeat(missing);

@@ -12,6 +12,7 @@ export interface RowView {
   readonly z: string;
   /** Set heavier. */
   readonly round: boolean;
+  /** HTML. */
   readonly cells: readonly string[];
 }
 
@@ -23,7 +24,7 @@ export function rowViews(redshifts: readonly string[], columns: readonly ColumnV
       id: rowId(z),
       z: aligned[start + i] ?? z,
       round: isRound(redshifts, start + i),
-      cells: columns.map(({ cells }) => cells[start + i] ?? ''),
+      cells: columns.map(({ printed }) => printed[start + i] ?? ''),
     })),
   );
 }
