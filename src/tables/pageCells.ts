@@ -50,19 +50,26 @@ export function pageColumn(
 /** One value to `digits` significant digits, set for a page; a power of ten where a plain number would be unwieldy. */
 export function pageNumber(value: number, digits: number, audited?: string): string {
   const rounded = roundValue(value, audited, digits);
-  const plainRange = rounded.exponent >= CALM.smallest - 1 && rounded.exponent <= CALM.largest;
+  const plainRange = rounded.exponent >= CALM.smallest - 1 && rounded.exponent <= LARGEST_PLAIN;
   return plainRange ? roundedCell(rounded, 0) : roundedPower(rounded, 0);
 }
 
 /** Digits of a rounded zero. */
 export const ZERO = '0';
 
+/** Largest power of ten of a number that stands without a power of its own. */
+export const LARGEST_PLAIN = CALM.largest;
+
 /** Rounded digits in units of 10^shift, with a power of their own where a plain number would be unwieldy. */
-export function roundedCell(rounded: RoundedDigits, shift: number): string {
-  const zero = rounded.digits === ZERO;
+function roundedCell(rounded: RoundedDigits, shift: number): string {
   const exponent = rounded.exponent - shift;
-  if (!zero && (exponent < SMALLEST_PLAIN || exponent > CALM.largest)) return roundedPower(rounded, shift);
-  return (rounded.negative ? MINUS : '') + grouped(plain(rounded.digits, zero ? 0 : exponent));
+  const unwieldy = exponent < SMALLEST_PLAIN || exponent > LARGEST_PLAIN;
+  return unwieldy && rounded.digits !== ZERO ? roundedPower(rounded, shift) : roundedPlain(rounded, shift);
+}
+
+/** Rounded digits in units of 10^shift, as a plain number. */
+export function roundedPlain({ negative, digits, exponent }: RoundedDigits, shift: number): string {
+  return (negative ? MINUS : '') + grouped(plain(digits, digits === ZERO ? 0 : exponent - shift));
 }
 
 /** Rounded digits in units of 10^shift, with a power of their own. */

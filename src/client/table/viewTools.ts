@@ -3,6 +3,7 @@ import type { Parts } from './parts.ts';
 import { rangeOf } from './rangeOf.ts';
 import { showColumns } from './showColumns.ts';
 import { countRows, showRange } from './showRange.ts';
+import { uncertaintySwitch } from './uncertaintySwitch.ts';
 import { readView, type View, writeView } from './viewState.ts';
 
 /** What other tools may ask of the view. */
@@ -11,7 +12,7 @@ export interface ViewTools {
 }
 
 /**
- * Range of rows and choice of columns. The view stands in the address, so that it can be sent to somebody, and is read
+ * Range of rows, choice of columns, and uncertainties. The view stands in the address, so that it can be sent to somebody, and is read
  * from there at the start.
  */
 export function startViewTools(parts: Parts, tools: HTMLElement): ViewTools {
@@ -24,6 +25,7 @@ export function startViewTools(parts: Parts, tools: HTMLElement): ViewTools {
     const ticked = choice.ticked();
     show({ ...view, columns: ticked.length === all.length ? undefined : ticked });
   });
+  const uncertainties = uncertaintySwitch(parts, tools, (on) => show({ ...view, u: on || undefined }));
   const ranged = (): void => show({ ...view, from: from.value.trim() || undefined, to: to.value.trim() || undefined });
   let view: View = {};
 
@@ -33,6 +35,7 @@ export function startViewTools(parts: Parts, tools: HTMLElement): ViewTools {
     to.value = view.to ?? '';
     choice.tick(view.columns ?? all);
     showColumns(parts, view.columns ?? all);
+    uncertainties?.show(view.u ?? false);
     whole.hidden = !view.from && !view.to && !view.columns;
     const range = rangeOf(parts.redshifts, from.value, to.value);
     if (typeof range !== 'string') showRange(parts, range);
@@ -46,7 +49,7 @@ export function startViewTools(parts: Parts, tools: HTMLElement): ViewTools {
   });
   part('.range').addEventListener('change', ranged);
   whole.addEventListener('click', () => {
-    show({});
+    show({ u: view.u });
     part('.columns summary').focus(); // the button is gone, and the focus must not go with it
   });
   show(readView(location.search, all));

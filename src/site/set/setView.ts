@@ -1,3 +1,4 @@
+import type { MilestoneName } from '../../cosmology/milestones.ts';
 import type { ParameterSet, Source } from '../../inputs/types.ts';
 import { pageNumber } from '../../tables/pageCells.ts';
 import type { EditionTables, Stamp } from '../../tables/types.ts';
@@ -6,6 +7,7 @@ import { type ContentsLine, contentsLines } from '../contents.ts';
 import { shownState } from '../currentEdition.ts';
 import { renderFormula } from '../formula.ts';
 import { derivedOf, milestonesOf } from '../lookUp.ts';
+import { type Missed, nonlinearCaution } from '../nonlinearCaution.ts';
 import { noteHtml } from '../noteHtml.ts';
 import { PAGE_DIGITS } from '../pageDigits.ts';
 import { type ParameterLine, parameterLines } from '../parameterLines.ts';
@@ -17,7 +19,7 @@ import { setTitle } from '../setTitle.ts';
 import { symbolOfName } from '../symbolOfName.ts';
 import { realMinus } from '../writtenNumber.ts';
 import { type BesideOthers, besideOthers } from './besideOthers.ts';
-import { type MilestoneLine, milestoneLines } from './milestoneLines.ts';
+import { type MilestoneLine, milestoneLines, milestoneSymbol } from './milestoneLines.ts';
 
 /** Everything a parameter-set page prints. */
 export interface SetView {
@@ -38,6 +40,8 @@ export interface SetView {
   readonly correlations: readonly string[];
   readonly milestones: readonly MilestoneLine[];
   readonly missing: readonly string[];
+  /** Milestones whose uncertainties are off, a sentence of HTML; "" if there are none. */
+  readonly nonlinear: string;
   readonly milestonesFile: { readonly name: string; readonly address: string; readonly checksum: string };
   readonly tables: readonly ContentsLine[];
   readonly beside: BesideOthers;
@@ -64,6 +68,7 @@ export function setView(press: Press, pressed: EditionTables, id: string): SetVi
     ),
     milestones: lines,
     missing,
+    nonlinear: table.nonlinear.length === 0 ? '' : nonlinearCaution(table.nonlinear.map(missedMilestone)),
     milestonesFile: {
       name: `${table.id}.csv`,
       address: address.csv(edition.number, table.id),
@@ -72,6 +77,10 @@ export function setView(press: Press, pressed: EditionTables, id: string): SetVi
     tables: contentsLines(pressed, id),
     beside: besideOthers(pressed, set),
   };
+}
+
+function missedMilestone(name: MilestoneName): Missed {
+  return { symbol: milestoneSymbol(name), where: '' };
 }
 
 function derivedHtml({ name, value }: Stamp['derived'][number]): string {

@@ -8,6 +8,7 @@ import { type RunningHead, runningHead } from '../runningHead.ts';
 import { setTitle } from '../setTitle.ts';
 import { TOPIC_TEXT } from '../topicText.ts';
 import { betweenRows } from './betweenRows.ts';
+import { type BudgetView, budgetView } from './budgetView.ts';
 import { cautions } from './cautions.ts';
 import { type ColumnView, columnViews } from './columnViews.ts';
 import { type Fit, fitOf } from './fitOf.ts';
@@ -30,6 +31,9 @@ export interface TableView {
   /** HTML. */
   readonly cautions: readonly string[];
   readonly turnTo: TurnTo;
+  /** The companion file; null for a set that gives no uncertainties. */
+  readonly uncertainties: { readonly name: string; readonly address: string } | null;
+  readonly budget: BudgetView | null;
   readonly colophon: Colophon;
 }
 
@@ -50,8 +54,10 @@ export function tableView(press: Press, pressed: EditionTables, table: Table): T
     groups: rowViews(table.redshifts, columns),
     fit: fitOf(columns),
     thumbs: thumbIndex(table.redshifts),
-    cautions: cautions(table),
+    cautions: cautions(table, columns),
     turnTo: turnTo(pressed, table),
+    uncertainties: table.uncertaintyCsv === null ? null : uncertaintyFile(edition.number, `${table.id}.u`),
+    budget: budgetView(table, columns),
     colophon: colophon(
       press.content.site,
       table.stamp,
@@ -61,4 +67,8 @@ export function tableView(press: Press, pressed: EditionTables, table: Table): T
       betweenRows(edition.number, table, columns),
     ),
   };
+}
+
+function uncertaintyFile(edition: string, id: string): { name: string; address: string } {
+  return { name: `${id}.csv`, address: address.csv(edition, id) };
 }
