@@ -1,6 +1,7 @@
 import { expect, test } from 'vitest';
 import { cellOf } from '../../src/client/search/cellOf.ts';
 import { rangeOf } from '../../src/client/table/rangeOf.ts';
+import { readUncertainties } from '../../src/client/table/readUncertainties.ts';
 import { readView, writeView } from '../../src/client/table/viewState.ts';
 
 const columns = ['D_C_Mpc', 'D_L_Mpc', 'mu_mag'];
@@ -11,20 +12,39 @@ test.each([
   ['?columns=mu_mag,D_C_Mpc', { columns: ['D_C_Mpc', 'mu_mag'] }],
   ['?columns=no_such_column', {}],
   ['?columns=D_C_Mpc,D_L_Mpc,mu_mag', {}],
+  ['?u=1', { u: true }],
+  ['?u=0', {}],
 ])('the address query %j is the view %j', (query, view) => {
   expect(readView(query, columns)).toEqual({ from: undefined, to: undefined, columns: undefined, ...view });
 });
 
 test('a view is written so that it is read again', () => {
-  const view = { from: '0.1', to: undefined, columns: ['D_L_Mpc', 'mu_mag'] };
+  const view = { from: '0.1', to: undefined, columns: ['D_L_Mpc', 'mu_mag'], u: true as const };
   const query = writeView('', view);
-  expect(query).toBe('?from=0.1&columns=D_L_Mpc,mu_mag');
+  expect(query).toBe('?from=0.1&columns=D_L_Mpc,mu_mag&u=1');
   expect(readView(query, columns)).toEqual(view);
 });
 
 test('the whole table has no query, and what is not of the view stays', () => {
-  expect(writeView('?from=1&to=2&columns=mu_mag', {})).toBe('');
+  expect(writeView('?from=1&to=2&columns=mu_mag&u=1', {})).toBe('');
   expect(writeView('?from=1&for=draft', { to: '2' })).toBe('?for=draft&to=2');
+});
+
+const uFile = 'z,u_D_C_Mpc,u_mu_mag\n0.00,0,\n0.05,1.7,0.017\n';
+
+test('the uncertainties of a file are found by row and column, in the order of the table', () => {
+  expect(readUncertainties(uFile, ['0.05', '0.00'], ['mu_mag', 'D_C_Mpc'])).toEqual([
+    ['0.017', '1.7'],
+    ['', '0'],
+  ]);
+});
+
+test.each([
+  ['a row', uFile, ['0.10'], ['D_C_Mpc']],
+  ['a column', uFile, ['0.05'], ['D_L_Mpc']],
+  ['everything', '<!doctype html>\n', ['0.05'], ['D_C_Mpc']],
+])('a file that lacks %s is refused', (_, csv, rows, some) => {
+  expect(() => readUncertainties(csv, rows, some)).toThrow(RangeError);
 });
 
 const redshifts = [0, 0.25, 0.5, 0.75, 1];

@@ -24,7 +24,10 @@ export interface BudgetLine {
 }
 
 /** Null for a table without uncertainties. */
-export function budgetView({ set, budgets }: Table, columns: readonly ColumnView[]): BudgetView | null {
+export function budgetView(
+  { set, budgets }: Pick<Table, 'set' | 'budgets'>,
+  columns: readonly Pick<ColumnView, 'id' | 'name' | 'symbol'>[],
+): BudgetView | null {
   if (budgets.length === 0) return null;
   const redshifts = [...new Set(budgets.map(({ redshift }) => redshift))];
   const parameters = parameterLines(set).filter(({ u }) => u !== '');
@@ -43,11 +46,13 @@ export function budgetView({ set, budgets }: Table, columns: readonly ColumnView
   };
 }
 
-/** Lines with the same parts made one, in the place of the first. */
+/** Lines with the same parts made one, in the place of the first; one quantity in several units is named once. */
 function together(lines: readonly BudgetLine[]): BudgetLine[] {
   const byParts = Map.groupBy(lines, ({ groups }) => JSON.stringify(groups));
   return [...byParts.values()].map((same) => ({
-    columns: same.flatMap(({ columns }) => columns),
+    columns: same
+      .flatMap(({ columns }) => columns)
+      .filter(({ symbol }, n, all) => all.findIndex((one) => one.symbol === symbol) === n),
     groups: same[0]?.groups ?? [],
   }));
 }

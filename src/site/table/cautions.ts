@@ -7,8 +7,11 @@ import type { ColumnView } from './columnViews.ts';
 /** Below this redshift a peculiar velocity of 300 km/s (0.001 in z) is more than 3 per cent of z. */
 const PECULIAR = 0.03;
 
+/** What the cautions of a table depend on. */
+type Cautioned = Pick<Table, 'set' | 'topic' | 'redshifts' | 'beyondAntipode' | 'nonlinear'>;
+
 /** What a reader of this table could be misled by, in short sentences of HTML. */
-export function cautions(table: Table, columns: readonly ColumnView[]): string[] {
+export function cautions(table: Cautioned, columns: readonly Pick<ColumnView, 'id' | 'symbol'>[]): string[] {
   const { set, topic, redshifts, beyondAntipode, nonlinear } = table;
   const lines: string[] = [];
   if (isUnchecked(set)) lines.push('Parameters written down from memory, not yet checked against the paper.');
