@@ -1,6 +1,6 @@
 import { QUANTITIES, type QuantityId } from '../../src/cosmology/quantities.ts';
 import { expectedOneOf } from '../../src/inputs/suggest.ts';
-import type { Content, ParameterSet } from '../../src/inputs/types.ts';
+import type { Content, Edition, ParameterSet } from '../../src/inputs/types.ts';
 import { UsageError } from './options.ts';
 
 /** Digits of a cell while no edition says otherwise. */
@@ -26,4 +26,13 @@ export function chosenColumn(id: string): QuantityId {
 export function digitsFor({ editions }: Content, { id }: ParameterSet): number {
   const digits = editions.filter(({ parameterSets }) => parameterSets.includes(id)).map((edition) => edition.digits);
   return digits.length === 0 ? USUAL_DIGITS : Math.max(...digits);
+}
+
+/** One edition, or every draft. @throws UsageError if there is none */
+export function chosenEditions({ editions }: Content, number: string | undefined): readonly Edition[] {
+  const chosen = editions.filter((one) => (number === undefined ? one.state === 'draft' : one.number === number));
+  if (chosen.length > 0) return chosen;
+  if (number === undefined) throw new UsageError('No edition is a draft; name one with --edition.');
+  const numbers = editions.map((one) => one.number);
+  throw new UsageError(`There is no edition "${number}": ${expectedOneOf(number, numbers)}`);
 }

@@ -1,9 +1,10 @@
 import { NoAdvice } from '../../src/tables/gridWish.ts';
 import { OutputError } from '../../src/tables/outputFolder.ts';
+import { AuditError } from './auditError.ts';
 import { UsageError } from './options.ts';
 import { ContentError } from './readFolder.ts';
 
-const MENDABLE = [UsageError, ContentError, OutputError, NoAdvice];
+const MENDABLE = [UsageError, ContentError, OutputError, NoAdvice, AuditError];
 
 /**
  * Runs a command and sets its exit code. What the person in front can mend is told in its own words; anything else is

@@ -1,4 +1,5 @@
-import { editionFiles, type FileBytes, filesOf } from './contentFiles.ts';
+import { certificate } from './certificate.ts';
+import { certificatePath, editionFiles, type FileBytes, filesOf } from './contentFiles.ts';
 import { edition } from './edition.ts';
 import { editionProblems } from './editionProblems.ts';
 import { nameProblems } from './nameProblems.ts';
@@ -8,7 +9,7 @@ import { placeInEdition } from './placeInEdition.ts';
 import { quantityFile } from './quantityFile.ts';
 import { redshiftGrid } from './redshiftGrid.ts';
 import { siteSettings } from './siteSettings.ts';
-import type { Checked, Content, Problem, ReadOptions, ReadResult } from './types.ts';
+import type { Checked, Content, Edition, Problem, ReadOptions, ReadResult } from './types.ts';
 import type { YamlFile } from './yamlFile.ts';
 
 /**
@@ -49,6 +50,17 @@ export function checkContent(
   const sets = found.sets.flatMap(({ id, path }) => read(path, (yaml) => parameterSet(id, yaml)));
   const grids = found.grids.flatMap(({ id, path }) => read(path, (yaml) => redshiftGrid(id, yaml)));
   const editions = found.editions.flatMap(({ id, path }) => read(path, (yaml) => edition(id, yaml)));
+  const certificates = new Map(
+    found.editions.flatMap(({ id }) => {
+      const bytes = bytesOf(certificatePath(id));
+      const value = bytes && keep(certificate(nameOf(certificatePath(id)), bytes));
+      return value === null ? [] : [[id, value] as const];
+    }),
+  );
+  const withCertificate = (one: Edition): Edition => {
+    const its = certificates.get(one.number);
+    return its === undefined ? one : { ...one, certificate: its };
+  };
   const pages = filesOf(files, 'quantities').map(({ id, path }) =>
     keep(quantityFile(id, nameOf(path), bytesOf(path), columnIds)),
   );
@@ -63,7 +75,7 @@ export function checkContent(
     site: settings,
     parameterSets: sets.map(({ value }) => value),
     redshiftGrids: grids.map(({ value }) => value),
-    editions: editions.map(({ value }) => value),
+    editions: editions.map(({ value }) => withCertificate(value)),
     quantities: pages.filter((page) => page !== null),
   };
   const extra = extraChecks?.(content, placeInEdition(editions)) ?? [];

@@ -37,6 +37,11 @@ export function editionFiles(files: FileBytes): ContentFile[] {
     .sort((a, b) => a.id.localeCompare(b.id, 'en', { numeric: true }));
 }
 
+/** Where the certificate of an edition's audit stands, if it has been audited. */
+export function certificatePath(number: string): string {
+  return `editions/${number}/audit.json`;
+}
+
 export function isReadme(name: string): boolean {
   return name === 'README.md';
 }

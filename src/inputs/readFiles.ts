@@ -1,6 +1,6 @@
 import { readdirSync, readFileSync, statSync } from 'node:fs';
 import { join } from 'node:path';
-import type { FileBytes } from './contentFiles.ts';
+import { certificatePath, type FileBytes } from './contentFiles.ts';
 
 const FOLDERS = ['parameter-sets', 'redshift-grids', 'quantities'];
 
@@ -14,6 +14,9 @@ export function readFiles(folder: string): FileBytes {
     'site.yaml',
     ...FOLDERS.flatMap((name) => filesIn(join(folder, name)).map((file) => `${name}/${file}`)),
     ...foldersIn(join(folder, 'editions')).map((number) => `editions/${number}/edition.yaml`),
+    ...foldersIn(join(folder, 'editions'))
+      .map(certificatePath)
+      .filter((path) => isFile(join(folder, path))),
   ];
   return new Map(paths.map((path) => [path, contents(join(folder, path))]));
 }

@@ -1,4 +1,5 @@
 import type { Parameters, ScalarParameter } from '../cosmology/parameters.ts';
+import type { Certificate } from './certificate.ts';
 
 /** Where a value stands in a keeper's file. Lines and columns count from 1. */
 export interface Place {
@@ -64,6 +65,8 @@ export interface Edition {
   readonly topics: readonly Topic[];
   readonly supersedes?: string | undefined;
   readonly errata: readonly { readonly date: string; readonly text: string }[];
+  /** What the last audit of its tables found; undefined before the first one. */
+  readonly certificate?: Certificate | undefined;
 }
 
 /** What the keeper says about the whole site: `content/site.yaml`. */

@@ -3,6 +3,7 @@ import type { SiteSettings } from '../inputs/types.ts';
 import type { Stamp } from '../tables/types.ts';
 import { absoluteAddress } from './absoluteAddress.ts';
 import { address } from './addresses.ts';
+import { auditText } from './auditText.ts';
 import type { ShownState } from './currentEdition.ts';
 import { renderFormula } from './formula.ts';
 import { type ParameterLine, parameterLines } from './parameterLines.ts';
@@ -27,6 +28,8 @@ export interface Colophon {
   }[];
   /** What interpolation in z between the rows is worth. */
   readonly between: BetweenRows;
+  /** What the audit found, in a sentence or two. */
+  readonly audit: string;
   readonly method: string;
   /** Address of the methods page. */
   readonly methods: string;
@@ -70,6 +73,7 @@ export function colophon(
       source: constant.source,
     })),
     between,
+    audit: auditText(stamp.audit),
     method: stamp.method,
     methods: address.methods(),
     file: { name: `${table}.csv`, address: address.csv(edition, table), checksum },
@@ -81,7 +85,12 @@ export function colophon(
   };
 }
 
-function foot(site: SiteSettings, { set, edition, method, checksum }: Stamp, state: ShownState, table: string): string {
+function foot(
+  site: SiteSettings,
+  { set, edition, method, checksum, audit }: Stamp,
+  state: ShownState,
+  table: string,
+): string {
   const values = Object.entries(set.parameters).flatMap(([id, value]) => {
     const u = set.uncertainties[id as ScalarParameter];
     if (value === undefined) return [];
@@ -89,7 +98,7 @@ function foot(site: SiteSettings, { set, edition, method, checksum }: Stamp, sta
   });
   return (
     `${site.title}, edition ${edition}${state === 'released' ? '' : ` (${state})`}. ${setTitle(set)}: ` +
-    `${values.join('; ')}. Method version ${method}. ${table}.csv, SHA-256 ${checksum}. ${site.licence.name}.`
+    `${values.join('; ')}. Method version ${method}${audit === null ? '' : `, audited ${audit.date}`}. ${table}.csv, SHA-256 ${checksum}. ${site.licence.name}.`
   );
 }
 

@@ -63,8 +63,9 @@ function pressTable(sheet: Sheet, topic: Topic): Table {
       ...row.map((value, column) => csvCell(value, edition.digits, audited[column]?.get(k))),
     ]),
   );
+  const id = `${set.id}.${topic}.${grid.id}`;
   return {
-    id: `${set.id}.${topic}.${grid.id}`,
+    id,
     set,
     topic,
     grid,
@@ -73,7 +74,7 @@ function pressTable(sheet: Sheet, topic: Topic): Table {
     values,
     audited,
     csv,
-    stamp: stamp(edition, set, model, sha256(csv)),
+    stamp: stamp(edition, set, model, id, sha256(csv)),
     beyondAntipode: beyondAntipode(model, sheet.epochs),
     ...uncertaintyTable(sheet.uncertain, grid, columns, values),
     ...interpolationTable(sheet.between, columns),

@@ -2,9 +2,10 @@ import type { Background } from '../cosmology/background.ts';
 import { CONSTANTS } from '../cosmology/constants.ts';
 import { densities } from '../cosmology/densities.ts';
 import type { Edition, ParameterSet } from '../inputs/types.ts';
+import { certificateEntry } from './certificateEntry.ts';
 import { csvCell } from './csvCell.ts';
 import { METHOD_VERSION } from './method.ts';
-import type { Stamp } from './types.ts';
+import type { Stamp, StampAudit } from './types.ts';
 
 /** Densities of today that follow from the parameters, to the edition's digits. */
 function derived(model: Background, digits: number): Stamp['derived'] {
@@ -21,8 +22,15 @@ function derived(model: Background, digits: number): Stamp['derived'] {
   return Object.entries(values).map(([name, value]) => ({ name, value: csvCell(value, digits) }));
 }
 
-/** What a table says of itself in every format: edition, parameters, constants, method version, checksum. */
-export function stamp(edition: Edition, set: ParameterSet, model: Background, checksum: string): Stamp {
+function auditOf({ certificate }: Edition, table: string, checksum: string): StampAudit | null {
+  const entry = certificateEntry(certificate, table, checksum);
+  if (certificate === undefined || entry === undefined || certificate.method !== METHOD_VERSION) return null;
+  const { cells, settled, largestError } = entry;
+  return { date: certificate.audited, workingDigits: certificate.workingDigits[0], cells, settled, largestError };
+}
+
+/** What a table says of itself in every format: edition, parameters, constants, method version, checksum, audit. */
+export function stamp(edition: Edition, set: ParameterSet, model: Background, table: string, checksum: string): Stamp {
   return {
     edition: edition.number,
     state: edition.state,
@@ -31,5 +39,6 @@ export function stamp(edition: Edition, set: ParameterSet, model: Background, ch
     derived: derived(model, edition.digits),
     constants: CONSTANTS,
     checksum,
+    audit: auditOf(edition, table, checksum),
   };
 }

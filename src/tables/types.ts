@@ -29,6 +29,21 @@ export interface Stamp {
   }[];
   /** SHA-256 of the CSV bytes, hex. */
   readonly checksum: string;
+  /** What the audit of exactly these bytes found; null when they have not been audited. */
+  readonly audit: StampAudit | null;
+}
+
+/** The audit of one table; no cell differed, or there would be no certificate. */
+export interface StampAudit {
+  /** ISO date. */
+  readonly date: string;
+  readonly workingDigits: number;
+  /** Cells compared, blank ones included, redshifts not. */
+  readonly cells: number;
+  /** Cells that had been settled by the audit when the table was made. */
+  readonly settled: number;
+  /** Largest relative error of a double value before rounding, as text. */
+  readonly largestError: string;
 }
 
 /** One table: a parameter set x a topic x a redshift grid. */

@@ -4,10 +4,10 @@ import { parse, stringify } from 'yaml';
 import { copyContent } from './copyContent.ts';
 
 /**
- * Writes the shipped content to `folder`, with editions that bind one parameter set and one grid, so that a command
- * takes seconds.
+ * Writes the shipped content to `folder`, with editions that bind one grid and one parameter set, or those that are
+ * named, so that a command takes seconds.
  */
-export function smallContent(folder: string): void {
+export function smallContent(folder: string, sets?: readonly string[]): void {
   copyContent(folder);
   for (const number of readdirSync(join(folder, 'editions'))) {
     const file = join(folder, 'editions', number, 'edition.yaml');
@@ -16,7 +16,7 @@ export function smallContent(folder: string): void {
     const [grid] = edition.redshift_grids;
     writeFileSync(
       file,
-      stringify({ ...edition, parameter_sets: [set], redshift_grids: [grid] }, { schema: 'failsafe' }),
+      stringify({ ...edition, parameter_sets: sets ?? [set], redshift_grids: [grid] }, { schema: 'failsafe' }),
     );
   }
 }

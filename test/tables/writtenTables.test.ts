@@ -18,6 +18,7 @@ const pressed = {
       interpolationCsv: 'column\na\n',
       redshifts: ['0'],
       columns: [{}],
+      audited: [new Map([[0, '1']])],
     },
     {
       id: 'a.distances.fine',
@@ -26,10 +27,11 @@ const pressed = {
       interpolationCsv: 'column\nd\ne\n',
       redshifts: ['0', '1'],
       columns: [{}, {}],
+      audited: [new Map(), new Map()],
     },
   ] as unknown as readonly Table[],
   milestones: [
-    { id: 'a.milestones', csv: 'name,value\n', milestones: [{}, {}, {}] },
+    { id: 'a.milestones', csv: 'name,value\n', milestones: [{}, { audited: '1.5' }, {}] },
   ] as unknown as readonly MilestoneTable[],
 } as unknown as EditionTables;
 
@@ -52,7 +54,7 @@ test('writeTables writes every CSV of an edition, byte for byte, to editions/NUM
 });
 
 test('countTables counts the z column and the lines of the milestones', () => {
-  expect(countTables([pressed, pressed])).toEqual({ tables: 6, rows: 12, cells: 22 });
+  expect(countTables([pressed, pressed])).toEqual({ tables: 6, rows: 12, cells: 22, settled: 4 });
 });
 
 test('differingTables names changed, missing and surplus files, and no others', () => {

@@ -1,3 +1,4 @@
+import { WORKING_DIGITS } from '../../tables/decidingText.ts';
 import { PAGE_DIGITS } from '../pageDigits.ts';
 import type { MethodText } from './section.ts';
 
@@ -66,9 +67,23 @@ zeros stay, for they are digits. Numbers from $10^{-4}$ to below $10^{12}$ are p
 exponent, as in 1.234567890E-27. A blank cell is empty. Exact zeros are a single 0. Redshifts are printed as the grid
 writes them and are never rounded.
 
-Parameters and redshifts are taken as the decimals that are written, and each value is the one for those decimals. It
-is computed in double precision; where it falls so close to the middle between two neighbouring decimals that its
-error decides, the last digit can be off by one. With ten digits that concerns a few cells in ten thousand at most.`,
+Parameters and redshifts are taken as the decimals that are written, and each value is the one for those decimals,
+correctly rounded. Double precision alone cannot promise that: where a value lies close to the middle between two
+neighbouring decimals, its error decides. So every double value carries a bound on its own error, counted in roundings
+along its formula. A cell whose bound reaches such a middle, about two in a thousand, is *settled*: evaluated again with
+${WORKING_DIGITS} digits. A value that is exactly a middle, such as 2.7255 K times 1.000125, goes to the even digit.
+The same holds for the cells of pages, at their own number of digits.`,
+  },
+  {
+    id: 'audit',
+    title: 'The audit',
+    body: `
+Before an edition is released, every cell of it is evaluated a second time by the *audit*: the defining integrals with
+${WORKING_DIGITS} working digits and again with ${WORKING_DIGITS + 16}, in arithmetic whose every operation is correctly
+rounded (MPFR), by code that shares nothing with the fast evaluation but the decimals of parameters, redshifts and
+constants. It is compared with the printed cell, and a certificate says how many cells were compared and settled and how
+large the largest error before rounding was. The colophon of a table quotes the certificate as long as it speaks of
+exactly the bytes of its file.`,
   },
   {
     id: 'pages-and-files',
