@@ -1,34 +1,36 @@
 import { roundHalfEven } from './roundHalfEven.ts';
 
-/** Digits of a double's decimal that are looked at; more cannot tell anything about the number behind a bound. */
-const LOOKED_AT = 17;
+/** Powers of ten that doubles have: 10^-330 underflows, 10^309 overflows. */
+const [SMALLEST, LARGEST] = [-330, 309];
+const POWERS = Array.from({ length: LARGEST - SMALLEST + 1 }, (_, k) => Number(`1e${SMALLEST + k}`));
+
+function tenTo(power: number): number {
+  return POWERS[power - SMALLEST] ?? Number.NaN;
+}
 
 /**
  * Whether every number within [value - bound, value + bound] rounds to the same digits as `value`, at each of the
- * numbers of digits in `counts` (at most 15). A bound of 0 is an exact value, and always settled.
+ * numbers of digits in `counts` (at most 12). A bound of 0 is an exact value, and always settled.
  *
- * Method: rounding changes half a unit of the last digit away from a rounded number. The 17 digits of the double tell
- *         how far off that is; only when the bound comes near it are both ends rounded.
+ * Method: rounding changes half a unit of the last digit away from a rounded number. How far off that is, is seen from
+ *         the value in those units; only when the bound, or the rounding of the division, comes near are both ends
+ *         rounded.
  */
 export function isSettled(value: number, bound: number, counts: readonly number[]): boolean {
-  if (bound === 0) return true;
-  const [mantissa = '', power = '0'] = Math.abs(value)
-    .toExponential(LOOKED_AT - 1)
-    .split('e');
-  const lastDigit = Number(`1e${Number(power) - LOOKED_AT + 1}`);
-  const reach = bound / lastDigit + 2;
-  // Just above a power of ten the interval may reach below it, where the digits are ten times finer.
-  const nearPower = Number(mantissa.replace('.', '')) - tenTo(LOOKED_AT - 1) <= reach;
-  return counts.every((count) => {
-    if (nearPower) return endsAgree(value, bound, count);
-    const tail = Number(mantissa.slice(count + 1));
-    const half = 5 * tenTo(LOOKED_AT - count - 1);
-    return reach < Math.abs(tail - half) || endsAgree(value, bound, count);
-  });
+  return (
+    bound === 0 || counts.every((count) => isFarFromBoundary(value, bound, count) || endsAgree(value, bound, count))
+  );
 }
 
-function tenTo(power: number): number {
-  return Number(`1e${power}`);
+function isFarFromBoundary(value: number, bound: number, count: number): boolean {
+  const size = Math.abs(value);
+  const lowest = tenTo(count - 1);
+  const unit = tenTo(Math.floor(Math.log10(size)) - count + 1);
+  const inUnits = size / unit;
+  // Two roundings of a number of `count` digits; then the logarithm may have missed the power of ten by one.
+  const reach = bound / unit + inUnits * 2 * Number.EPSILON;
+  const insideDecade = inUnits - lowest > reach + 1 && 10 * lowest - inUnits > reach + 1;
+  return insideDecade && Math.abs(inUnits - Math.floor(inUnits) - 0.5) > reach;
 }
 
 function endsAgree(value: number, bound: number, count: number): boolean {
